@@ -1,0 +1,237 @@
+#include "rank_sum_law.h"
+
+#include "binomial_coefficient.h"
+#include "compensated_sum.h"
+#include "split_up.h"
+
+#include <algorithm>
+#include <limits>
+#include <numeric>
+#include <variant>
+
+namespace rankstead {
+
+namespace {
+
+constexpr double largest_log2 = 1000; // of an arrangement count held in a double
+
+std::int64_t sum_of(const std::vector<std::int64_t>& scores) {
+    return std::accumulate(scores.begin(), scores.end(), std::int64_t{0});
+}
+
+// The same law seen from the other sample, whose sum is what is left over.
+ChoiceScores complement(const ChoiceScores& scores) {
+    const auto n = static_cast<std::int64_t>(scores.scores.size());
+    return {scores.scores, n - scores.chosen, sum_of(scores.scores) - scores.statistic};
+}
+
+// The same law upside down.
+ChoiceScores reflected(const ChoiceScores& scores) {
+    ChoiceScores result{scores.scores, scores.chosen, scores.chosen * scores.scores.back() - scores.statistic};
+    std::transform(scores.scores.rbegin(), scores.scores.rend(), result.scores.begin(),
+                   [top = scores.scores.back()](std::int64_t score) { return top - score; });
+    return result;
+}
+
+// Brings a law to the smaller sample and to the lower half, so that equal questions are one computation and the tail
+// that is summed is the smaller one. `swaps` says whether the tails change places.
+struct Canonical {
+    ChoiceScores scores;
+    bool swaps = false;
+    bool centred = false; // symmetric and at its centre: both tails are equal
+};
+
+Canonical canonical(const ChoiceScores& scores) {
+    const auto n = static_cast<std::int64_t>(scores.scores.size());
+    const std::int64_t sum = sum_of(scores.scores);
+    Canonical result{scores, false, false};
+    if (2 * scores.chosen == n) {
+        result.centred = 2 * scores.statistic == sum;
+        if (2 * scores.statistic > sum) {
+            result = {complement(scores), true, false};
+        }
+        return result;
+    }
+    if (2 * scores.chosen > n) {
+        result = {complement(scores), true, false};
+    }
+    // Mean chosen * sum / n.
+    if (result.scores.statistic * n > result.scores.chosen * sum) {
+        result = {reflected(result.scores), !result.swaps, false};
+    }
+    return result;
+}
+
+Tails counted(const ChoiceScores& scores, std::uint64_t total) {
+    const auto mass = split_up_tail<std::uint64_t>(scores);
+    return from_counts({mass.below + mass.at, total - mass.below, total});
+}
+
+Tails summed(const ChoiceScores& scores) {
+    const auto n = static_cast<std::int64_t>(scores.scores.size());
+    const double total = double_choose(n, scores.chosen);
+    const auto mass = split_up_tail<double>(scores);
+    Tails tails;
+    tails.lower = (mass.below + mass.at) / total;
+    tails.upper = 1 - mass.below / total;
+    tails.relative_error = (static_cast<double>(n) + 12) * 0.5 * std::numeric_limits<double>::epsilon();
+    return tails;
+}
+
+} // namespace
+
+ChoiceScores choice_scores(const PooledRanking& ranking) {
+    ChoiceScores result;
+    result.chosen = ranking.first;
+    const std::int64_t lowest = ranking.groups.front().doubled_rank;
+    std::int64_t divisor = 0;
+    for (const PooledGroup& group : ranking.groups) {
+        divisor = std::gcd(divisor, group.doubled_rank - lowest);
+    }
+    divisor = std::max<std::int64_t>(divisor, 1);
+    for (const PooledGroup& group : ranking.groups) {
+        const std::int64_t score = (group.doubled_rank - lowest) / divisor;
+        result.scores.insert(result.scores.end(), static_cast<std::size_t>(group.count()), score);
+        result.statistic += score * group.first;
+    }
+    return result;
+}
+
+ChoiceScores untied_choice_scores(std::int64_t first, std::int64_t second, std::int64_t u) {
+    ChoiceScores result;
+    result.chosen = first;
+    result.scores.resize(static_cast<std::size_t>(first + second));
+    std::iota(result.scores.begin(), result.scores.end(), std::int64_t{0});
+    result.statistic = u + first * (first - 1) / 2;
+    return result;
+}
+
+double rank_sum_cost(const ChoiceScores& scores) {
+    const auto n = static_cast<std::int64_t>(scores.scores.size());
+    if (log2_choose(n, scores.chosen) > largest_log2) {
+        return std::numeric_limits<double>::infinity();
+    }
+    return split_up_seconds(canonical(scores).scores);
+}
+
+Tails rank_sum_tails(const ChoiceScores& scores) {
+    const Canonical law = canonical(scores);
+    const auto n = static_cast<std::int64_t>(scores.scores.size());
+    const auto total = exact_choose(n, scores.chosen);
+    constexpr UInt128 most_counted = UInt128{1} << 63;
+    Tails tails =
+        total && *total < most_counted ? counted(law.scores, static_cast<std::uint64_t>(*total)) : summed(law.scores);
+    if (law.centred) {
+        tails.upper = tails.lower;
+    }
+    return law.swaps ? tails.swapped() : tails;
+}
+
+// ------------------------------------------------------------------------------------------------ without ties
+
+namespace {
+
+constexpr double seconds_per_wide_addition = 0.6e-9;
+
+// Coefficients of the Gaussian binomial [m+n choose m] up to q^top: multiply by (1 - q^(n+i)), divide by (1 - q^i).
+// Unsigned arithmetic wraps, and what is left at the end is exact because it is below the modulus.
+template <class Count>
+std::vector<Count> gaussian_binomial(std::int64_t m, std::int64_t n, std::int64_t top) {
+    std::vector<Count> count(static_cast<std::size_t>(top + 1), Count(0));
+    count[0] = 1;
+    for (std::int64_t i = 1; i <= m; ++i) {
+        const std::int64_t reach = std::min(top, n * i);
+        for (std::int64_t k = reach; k >= n + i; --k) {
+            count[static_cast<std::size_t>(k)] -= count[static_cast<std::size_t>(k - n - i)];
+        }
+        for (std::int64_t k = i; k <= reach; ++k) {
+            count[static_cast<std::size_t>(k)] += count[static_cast<std::size_t>(k - i)];
+        }
+    }
+    return count;
+}
+
+double gaussian_binomial_seconds(std::int64_t first, std::int64_t second) {
+    const auto m = static_cast<double>(std::min(first, second));
+    return seconds_per_wide_addition * 2 * m * m * static_cast<double>(std::max(first, second)) / 2;
+}
+
+constexpr double most_entries = 2.5e6; // 40 MB of 128-bit counts
+
+bool integers_suffice(std::int64_t first, std::int64_t second) {
+    return static_cast<double>(first) * static_cast<double>(second) / 2 <= most_entries &&
+           log2_choose(first + second, first) < 126;
+}
+
+} // namespace
+
+class UntiedRankSumLaw::Cumulative {
+public:
+    Cumulative(std::int64_t first, std::int64_t second, UInt128 total) : total_(total) {
+        const std::int64_t m = std::min(first, second);
+        const std::int64_t n = std::max(first, second);
+        constexpr UInt128 most_counted = UInt128{1} << 63;
+        if (total < most_counted) {
+            counts_ = gaussian_binomial<std::uint64_t>(m, n, m * n / 2);
+        } else {
+            counts_ = gaussian_binomial<UInt128>(m, n, m * n / 2);
+        }
+        std::visit([](auto& counts) { std::partial_sum(counts.begin(), counts.end(), counts.begin()); }, counts_);
+    }
+
+    // Both tails at the k-th value from below, in the lower half.
+    [[nodiscard]] Tails at(std::size_t k) const {
+        const UInt128 lower = count_up_to(k);
+        const UInt128 upper = total_ - (k > 0 ? count_up_to(k - 1) : 0);
+        if (std::holds_alternative<std::vector<std::uint64_t>>(counts_)) {
+            return from_counts({static_cast<std::uint64_t>(lower), static_cast<std::uint64_t>(upper),
+                                static_cast<std::uint64_t>(total_)});
+        }
+        Tails tails;
+        tails.lower = static_cast<double>(lower) / static_cast<double>(total_);
+        tails.upper = static_cast<double>(upper) / static_cast<double>(total_);
+        tails.relative_error = 1.5 * std::numeric_limits<double>::epsilon();
+        return tails;
+    }
+
+private:
+    [[nodiscard]] UInt128 count_up_to(std::size_t k) const {
+        return std::visit([k](const auto& counts) { return static_cast<UInt128>(counts[k]); }, counts_);
+    }
+
+    UInt128 total_;
+    std::variant<std::vector<std::uint64_t>, std::vector<UInt128>> counts_;
+};
+
+UntiedRankSumLaw::UntiedRankSumLaw(std::int64_t first, std::int64_t second) : first_(first), second_(second) {
+    if (integers_suffice(first, second)) {
+        cumulative_ = std::make_unique<Cumulative>(first, second, exact_choose(first + second, first).value());
+    }
+}
+
+UntiedRankSumLaw::~UntiedRankSumLaw() = default;
+
+Tails UntiedRankSumLaw::at(std::int64_t k) const {
+    const std::int64_t pairs = first_ * second_;
+    const bool above = 2 * k > pairs;
+    const std::int64_t low = above ? pairs - k : k;
+    Tails tails = cumulative_ ? cumulative_->at(static_cast<std::size_t>(low))
+                              : rank_sum_tails(untied_choice_scores(first_, second_, low));
+    if (2 * k == pairs) {
+        tails.upper = tails.lower;
+    }
+    return above ? tails.swapped() : tails;
+}
+
+double UntiedRankSumLaw::cost(std::int64_t first, std::int64_t second, int queries) {
+    if (integers_suffice(first, second)) {
+        return gaussian_binomial_seconds(first, second);
+    }
+    constexpr double too_many = 1e5;
+    if (static_cast<double>(first) + static_cast<double>(second) > too_many) {
+        return std::numeric_limits<double>::infinity();
+    }
+    return queries * rank_sum_cost(untied_choice_scores(first, second, first * second / 2));
+}
+
+} // namespace rankstead

@@ -1,0 +1,56 @@
+// The null law of the rank sum, conditional on the ties observed: every choice of m of the N pooled values equally
+// likely. With ties by split-up dynamic programming (van de Wiel 2001): each half of the pooled values by itself,
+// merged with cumulative sums. Without ties by the Gaussian binomial (Andrews 1976) in exact integers, modulo a power
+// of two that the result is known to stay below.
+#pragma once
+
+#include "../ranks.h"
+#include "tails.h"
+
+#include <cstdint>
+#include <memory>
+#include <vector>
+
+namespace rankstead {
+
+// The scores of the pooled values, lowest 0, divided by their common divisor; the law is that of the sum of `chosen` of
+// them, `statistic` the observed sum.
+struct ChoiceScores {
+    std::vector<std::int64_t> scores; // ascending
+    std::int64_t chosen = 0;
+    std::int64_t statistic = 0;
+};
+
+[[nodiscard]] ChoiceScores choice_scores(const PooledRanking& ranking);
+
+// 0, 1, ..., first + second - 1, with U of the first sample.
+[[nodiscard]] ChoiceScores untied_choice_scores(std::int64_t first, std::int64_t second, std::int64_t u);
+
+// Predicted seconds for one law; infinity where it would need too much memory or overflow a double.
+[[nodiscard]] double rank_sum_cost(const ChoiceScores& scores);
+
+// Both tails. Swapping the samples swaps the tails exactly.
+[[nodiscard]] Tails rank_sum_tails(const ChoiceScores& scores);
+
+// P(U <= k) for all k up to half the range, without ties: computed once where the integers suffice, else for each k.
+class UntiedRankSumLaw {
+public:
+    UntiedRankSumLaw(std::int64_t first, std::int64_t second);
+    ~UntiedRankSumLaw();
+    UntiedRankSumLaw(const UntiedRankSumLaw&) = delete;
+    UntiedRankSumLaw& operator=(const UntiedRankSumLaw&) = delete;
+
+    // Both tails at U = k, 0 <= k <= first * second.
+    [[nodiscard]] Tails at(std::int64_t k) const;
+
+    // Predicted seconds for the law and `queries` values of k.
+    [[nodiscard]] static double cost(std::int64_t first, std::int64_t second, int queries);
+
+private:
+    class Cumulative;
+    std::int64_t first_;
+    std::int64_t second_;
+    std::unique_ptr<Cumulative> cumulative_;
+};
+
+} // namespace rankstead

@@ -1,0 +1,43 @@
+// What every null law gives: both tails of a statistic, each with the observed value in it.
+#pragma once
+
+#include "../settings.h"
+
+#include <cstdint>
+#include <limits>
+#include <optional>
+
+namespace rankstead {
+
+// A p value is never 0: below the range of a double it is this, the smallest normal one.
+inline constexpr double smallest_positive_p = std::numeric_limits<double>::min();
+
+// The number of equally likely arrangements in each tail, where all of them fit 63 bits.
+struct Counts {
+    std::uint64_t lower = 0;
+    std::uint64_t upper = 0;
+    std::uint64_t total = 1;
+};
+
+struct Tails {
+    double lower = 1;
+    double upper = 1;
+    std::optional<Counts> counts;
+    double relative_error = 0; // bound on the relative error of the smaller tail
+
+    [[nodiscard]] Tails swapped() const;
+};
+
+[[nodiscard]] Tails from_counts(const Counts& counts);
+
+// Two-sided: twice the smaller tail, at most 1.
+[[nodiscard]] double p_value(const Tails& tails, Side side);
+
+// p as a number of arrangements, out of counts.total. Needs counts.
+[[nodiscard]] std::uint64_t p_count(const Tails& tails, Side side);
+
+// Whether the upper tail is at most `rate`: in integers where the law is counted, so that 2/20 is 0.1 exactly.
+[[nodiscard]] bool upper_at_most(const Tails& tails, const Fraction& rate);
+[[nodiscard]] bool lower_at_most(const Tails& tails, const Fraction& rate);
+
+} // namespace rankstead

@@ -1,0 +1,143 @@
+// Steps that several studies share.
+#pragma once
+
+#include "../estimates/limits.h"
+#include "../grid.h"
+#include "../laws/tails.h"
+#include "../outcome.h"
+
+#include <algorithm>
+#include <cmath>
+#include <string>
+#include <vector>
+
+namespace rankstead {
+
+// What the exact law of one call may take, p and both limits together, by prediction. Half a second is the ceiling for
+// anything automatic; the margin is for slower machines.
+inline constexpr double exact_budget_seconds = 0.3;
+
+// Laws evaluated for a pair of limits by galloping and bisection, as predicted for the budget.
+inline constexpr int laws_per_interval = 14;
+
+// Fills p, arrangements and accuracy from an exact law.
+void take_exact(Outcome& outcome, const Tails& tails);
+
+// The name for sentences: the setting, else the heading, else `otherwise`.
+[[nodiscard]] std::string chosen_name(const std::string& setting, const std::string& heading,
+                                      const std::string& otherwise);
+
+// Why no finite limits exist, for `smallest_tail`, the smallest tail probability that the sizes can give.
+[[nodiscard]] std::string no_limits_reason(const Settings& settings, double smallest_tail);
+
+template <class Int>
+[[nodiscard]] std::vector<Int> negated(const std::vector<Int>& sorted) {
+    std::vector<Int> result(sorted.rbegin(), sorted.rend());
+    for (Int& value : result) {
+        value = -value;
+    }
+    return result;
+}
+
+template <class Int>
+[[nodiscard]] std::vector<Int> times(const std::vector<Int>& values, int factor) {
+    std::vector<Int> result(values);
+    for (Int& value : result) {
+        value *= factor;
+    }
+    return result;
+}
+
+template <class Int>
+[[nodiscard]] bool has_equal_neighbours(const std::vector<Int>& sorted) {
+    return std::adjacent_find(sorted.begin(), sorted.end()) != sorted.end();
+}
+
+// Where the gap just above the k-th smallest breakpoint lies.
+template <class Int>
+struct GapPlace {
+    Int twice_middle;
+    std::int64_t first = 0;
+    std::int64_t last = 0;
+};
+
+template <class Int>
+[[nodiscard]] GapPlace<Int> gap_above(const OrderedSums<Int>& breakpoints, std::int64_t k) {
+    if (k == 0) {
+        return {Int(2 * breakpoints.at(1) - 2), 0, 0};
+    }
+    const Int below = breakpoints.at(k);
+    const std::int64_t last = breakpoints.count_at_most(below);
+    const Int above = last == breakpoints.size() ? Int(below + 2) : breakpoints.next_above(below);
+    return {Int(below + above), breakpoints.count_below(below) + 1, last};
+}
+
+// A law that is the same in every gap: the statistic there is the number of breakpoints above.
+template <class Law>
+[[nodiscard]] GapTails one_law_gaps(std::int64_t breakpoints, Law law) {
+    return [breakpoints, law = std::move(law)](std::int64_t k) { return Gap{law(breakpoints - k), k, k}; };
+}
+
+// The median of the breakpoints; each is a multiple of 2^-halvings on the grid.
+template <class Int>
+[[nodiscard]] double median_breakpoint(const OrderedSums<Int>& breakpoints, int halvings, const Grid& grid) {
+    const std::int64_t size = breakpoints.size();
+    if (size % 2 == 1) {
+        return off_grid(breakpoints.at((size + 1) / 2), halvings, grid);
+    }
+    return off_grid(Int(breakpoints.at(size / 2) + breakpoints.at(size / 2 + 1)), halvings + 1, grid);
+}
+
+// One inverted test: its breakpoints as they are and mirrored, with the tails in the gaps of each.
+template <class Int>
+struct Inversion {
+    OrderedSums<Int> breakpoints;
+    GapTails tails;
+    OrderedSums<Int> mirrored;
+    GapTails mirrored_tails;
+    double spread = 0; // standard deviation of the statistic without ties
+    int halvings = 0;  // breakpoints are multiples of 2^-halvings on the grid
+    double smallest_tail = 0;
+};
+
+template <class Int>
+[[nodiscard]] LowerLimit<Int> lower_limit(const OrderedSums<Int>& breakpoints, const GapTails& tails,
+                                          const Settings& settings, double spread) {
+    const Fraction rate = tail_rate(settings);
+    return settings.interval == IntervalRule::matching ? matching_lower_limit(breakpoints, tails, rate, spread)
+                                                       : table_lower_limit(breakpoints, tails, rate, spread);
+}
+
+// Fills lower, upper and confidence.
+template <class Int>
+void take_limits(Outcome& outcome, const Inversion<Int>& inversion, const Grid& grid) {
+    const Settings& settings = outcome.settings;
+    const std::string other_side = "with side=" + std::string(settings.side == Side::higher ? "higher" : "lower") +
+                                   " the interval has only its other limit.";
+    double outside = 0;
+    const auto take = [&](Figure& limit, const LowerLimit<Int>& found, bool mirror) {
+        if (!found.value) {
+            limit = Figure::none(no_limits_reason(settings, inversion.smallest_tail));
+            outcome.observations.interval_reason = limit.reason;
+            return;
+        }
+        outside = std::max(outside, found.outside);
+        limit = Figure::of(off_grid(mirror ? Int(-*found.value) : *found.value, inversion.halvings, grid));
+    };
+    outcome.lower = outcome.upper = Figure::none(other_side);
+    if (settings.side != Side::lower) {
+        take(outcome.lower, lower_limit(inversion.breakpoints, inversion.tails, settings, inversion.spread), false);
+    }
+    if (settings.side != Side::higher) {
+        take(outcome.upper, lower_limit(inversion.mirrored, inversion.mirrored_tails, settings, inversion.spread),
+             true);
+    }
+    const std::string& reason = outcome.observations.interval_reason;
+    const double missed = settings.side == Side::two_sided ? 2 * outside : outside;
+    outcome.confidence = reason.empty() ? Figure::of(1 - missed) : Figure::none(reason);
+}
+
+// Keeps the limit that the side asks for; the other has none.
+void take_chance(Outcome& outcome, double chance, const std::optional<Interval>& interval, const std::string& reason);
+
+} // namespace rankstead

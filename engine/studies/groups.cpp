@@ -1,0 +1,203 @@
+#include "../laws/binomial_coefficient.h"
+#include "../laws/normal_approximation.h"
+#include "../laws/rank_sum_law.h"
+#include "common.h"
+#include "fingerprint.h"
+#include "studies.h"
+
+#include <memory>
+
+namespace rankstead {
+
+namespace {
+
+template <class Int>
+struct TwoSamples {
+    std::vector<Int> first;  // ascending, not empty
+    std::vector<Int> second; // ascending, not empty
+    Int margin;
+    Grid grid;
+};
+
+// The probability of the lowest or highest rank sum: the ways to fill the last tie group that is not taken whole.
+template <class Groups>
+double extreme_tail(const PooledRanking& ranking, const Groups& in_order) {
+    std::int64_t wanted = ranking.first;
+    for (const PooledGroup& group : in_order) {
+        if (wanted <= group.count()) {
+            const std::int64_t all = ranking.first + ranking.second;
+            const auto ways = exact_choose(group.count(), wanted);
+            const auto total = exact_choose(all, ranking.first);
+            return ways && total ? static_cast<double>(*ways) / static_cast<double>(*total)
+                                 : std::exp2(log2_choose(group.count(), wanted) - log2_choose(all, ranking.first));
+        }
+        wanted -= group.count();
+    }
+    return 1;
+}
+
+double smallest_two_sided_p(const PooledRanking& ranking) {
+    const std::vector<PooledGroup> reversed(ranking.groups.rbegin(), ranking.groups.rend());
+    const double tail = std::min(extreme_tail(ranking, ranking.groups), extreme_tail(ranking, reversed));
+    return std::clamp(2 * tail, smallest_positive_p, 1.0);
+}
+
+double smallest_untied_tail(std::int64_t first, std::int64_t second) {
+    const auto total = exact_choose(first + second, first);
+    return total ? 1 / static_cast<double>(*total) : std::exp2(-log2_choose(first + second, first));
+}
+
+Moments untied_moments(std::int64_t first, std::int64_t second) {
+    const auto m = static_cast<double>(first);
+    const auto n = static_cast<double>(second);
+    return {m * n / 2, m * n * (m + n + 1) / 12};
+}
+
+// In the gaps between differences only equal values within a sample tie, and U is the number of differences above.
+template <class Int>
+class RankSumPlan {
+public:
+    RankSumPlan(const Outcome& outcome, const TwoSamples<Int>& samples, const PooledRanking& ranking)
+        : samples_(samples), first_(ranking.first), second_(ranking.second),
+          table_(outcome.settings.interval == IntervalRule::table),
+          tied_within_(has_equal_neighbours(samples.first) || has_equal_neighbours(samples.second)),
+          untied_(ranking.tied() == 0) {
+        exact_ = outcome.settings.method != Method::approximate && seconds(ranking) <= exact_budget_seconds;
+        if (exact_ && (one_law() || untied_)) {
+            law_ = std::make_shared<const UntiedRankSumLaw>(first_, second_);
+        }
+    }
+
+    [[nodiscard]] bool exact() const { return exact_; }
+
+    [[nodiscard]] Tails observed(const PooledRanking& ranking) const {
+        return untied_ ? law_->at(ranking.doubled_u() / 2) : rank_sum_tails(choice_scores(ranking));
+    }
+
+    [[nodiscard]] Inversion<Int> inversion() const {
+        Inversion<Int> result{
+            OrderedSums<Int>::differences(samples_.first, samples_.second), gap_tails(samples_.first, samples_.second),
+            OrderedSums<Int>::differences(samples_.second, samples_.first), gap_tails(samples_.second, samples_.first)};
+        result.spread = std::sqrt(untied_moments(first_, second_).variance);
+        result.smallest_tail = smallest_untied_tail(first_, second_);
+        return result;
+    }
+
+private:
+    [[nodiscard]] bool one_law() const { return table_ || !tied_within_; }
+
+    [[nodiscard]] double seconds(const PooledRanking& ranking) const {
+        double sum = 0;
+        if (one_law() || untied_) {
+            sum += UntiedRankSumLaw::cost(first_, second_, laws_per_interval);
+        }
+        if (!untied_) {
+            const double one = rank_sum_cost(choice_scores(ranking));
+            sum += one_law() ? one : laws_per_interval * one;
+        }
+        return sum;
+    }
+
+    [[nodiscard]] GapTails gap_tails(const std::vector<Int>& x, const std::vector<Int>& y) const {
+        const std::int64_t pairs = first_ * second_;
+        if (!exact_) {
+            const Moments moments = table_ ? untied_moments(first_, second_)
+                                           : rank_sum_moments(rank_pooled(x, y, Int(x.front() - y.back() - 1)));
+            return one_law_gaps(
+                pairs, [moments](std::int64_t above) { return normal_tails(static_cast<double>(above), moments); });
+        }
+        if (one_law()) {
+            return one_law_gaps(pairs, [law = law_](std::int64_t above) { return law->at(above); });
+        }
+        return [sums = std::make_shared<const OrderedSums<Int>>(OrderedSums<Int>::differences(x, y)),
+                twice_x = times(x, 2), twice_y = times(y, 2)](std::int64_t k) {
+            const GapPlace<Int> gap = gap_above(*sums, k);
+            return Gap{rank_sum_tails(choice_scores(rank_pooled(twice_x, twice_y, gap.twice_middle))), gap.first,
+                       gap.last};
+        };
+    }
+
+    const TwoSamples<Int>& samples_;
+    std::int64_t first_;
+    std::int64_t second_;
+    bool table_;
+    bool tied_within_;
+    bool untied_;
+    bool exact_ = false;
+    std::shared_ptr<const UntiedRankSumLaw> law_;
+};
+
+template <class Int>
+void rank_sum_test(Outcome& outcome, const TwoSamples<Int>& samples) {
+    const PooledRanking ranking = rank_pooled(samples.first, samples.second, samples.margin);
+    const RankSumPlan<Int> plan(outcome, samples, ranking);
+    outcome.statistic = static_cast<double>(ranking.doubled_u()) / 2;
+    outcome.tied = static_cast<std::size_t>(ranking.tied());
+    outcome.smallest_p = smallest_two_sided_p(ranking);
+    if (plan.exact()) {
+        take_exact(outcome, plan.observed(ranking));
+    } else {
+        const Moments moments = rank_sum_moments(ranking);
+        outcome.exact = false;
+        outcome.p = normal_p(outcome.statistic, moments, outcome.settings.side);
+        outcome.z = normal_deviate(outcome.statistic, moments, outcome.settings.side);
+        outcome.observations.exact_wanted_but_too_long = outcome.settings.method != Method::approximate;
+    }
+    const Inversion<Int> inversion = plan.inversion();
+    outcome.estimate = median_breakpoint(inversion.breakpoints, 0, samples.grid);
+    take_limits(outcome, inversion, samples.grid);
+}
+
+template <class Int>
+void take_superiority(Outcome& outcome, const TwoSamples<Int>& samples) {
+    const PooledRanking ranking = rank_pooled(samples.first, samples.second, Int(0));
+    const double rate = tail_rate(outcome.settings).value();
+    const auto interval = outcome.settings.chance_interval == ChanceInterval::placement
+                              ? placement_interval(ranking, rate)
+                              : std::optional(newcombe_interval(ranking, rate));
+    take_chance(outcome, chance_of(ranking), interval,
+                "a group of one value has no spread, so the placement interval does not exist. Use "
+                "chance interval=newcombe, or more values.");
+}
+
+// Interquartile ranges that differ more than threefold, from five values a group on.
+bool spreads_differ(const Sample& first, const Sample& second) {
+    constexpr std::size_t enough = 5;
+    constexpr double times_wider = 3;
+    const double a = first.description.upper_quartile - first.description.lower_quartile;
+    const double b = second.description.upper_quartile - second.description.lower_quartile;
+    return first.n >= enough && second.n >= enough && std::max(a, b) > times_wider * std::min(a, b);
+}
+
+} // namespace
+
+Outcome run_groups(const Arguments& arguments, const Settings& settings) {
+    const Column first = read_column(*arguments[0], settings);
+    const Column second = read_column(*arguments[1], settings);
+    Outcome outcome;
+    outcome.study = StudyId::groups;
+    outcome.settings = settings;
+    outcome.ledgers = {first.ledger, second.ledger};
+    outcome.n = first.values.size() + second.values.size();
+    Grid grid;
+    grid.cover(first.values);
+    grid.cover(second.values);
+    grid.cover(settings.margin);
+    with_integers(grid, [&]<class Int>() {
+        TwoSamples<Int> samples{on_grid<Int>(first.values, grid), on_grid<Int>(second.values, grid),
+                                on_grid<Int>(settings.margin, grid), grid};
+        std::sort(samples.first.begin(), samples.first.end());
+        std::sort(samples.second.begin(), samples.second.end());
+        outcome.first = {chosen_name(settings.first_name, first.heading, "first"), first.values.size(),
+                         describe(samples.first, grid)};
+        outcome.second = {chosen_name(settings.second_name, second.heading, "second"), second.values.size(),
+                          describe(samples.second, grid)};
+        rank_sum_test(outcome, samples);
+        take_superiority(outcome, samples);
+    });
+    outcome.observations.spreads_differ = spreads_differ(outcome.first, *outcome.second);
+    outcome.fingerprint = Fingerprint().add(first).add(second).text();
+    return outcome;
+}
+
+} // namespace rankstead
