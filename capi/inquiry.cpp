@@ -128,6 +128,11 @@ std::shared_ptr<const Outcome> computed(const rks_inquiry& inquiry) {
     return outcome;
 }
 
+void fail(rks_inquiry& inquiry, Status status) {
+    const std::string words(status_text(static_cast<std::int32_t>(status)));
+    inquiry.failure = {status, words, words, {}};
+}
+
 // Any change discards what an earlier run found.
 void discard(rks_inquiry& inquiry) {
     inquiry.outcome.reset();
@@ -179,7 +184,10 @@ void run(rks_inquiry& inquiry) {
         inquiry.failure = {refusal.status(), refusal.message(), refusal.reason(), refusal.place()};
         throw;
     } catch (const std::bad_alloc&) {
-        inquiry.failure = {Status::out_of_memory, "There is not enough memory.", "There is not enough memory.", {}};
+        fail(inquiry, Status::out_of_memory);
+        throw;
+    } catch (...) {
+        fail(inquiry, Status::internal);
         throw;
     }
 }

@@ -9,11 +9,10 @@
 
 #include <array>
 
-namespace rankstead {
-namespace {
+namespace rankstead::rows {
 
-constexpr Studies every_data_study = only(StudyId::single) | only(StudyId::pairs) | only(StudyId::groups);
-constexpr Studies two_samples = only(StudyId::pairs) | only(StudyId::groups);
+inline constexpr Studies every_data_study = only(StudyId::single) | only(StudyId::pairs) | only(StudyId::groups);
+inline constexpr Studies two_samples = only(StudyId::pairs) | only(StudyId::groups);
 
 inline Reading reading(const Figure& figure) {
     return figure.value ? Reading(*figure.value) : Reading(NoAnswer{figure.reason});
@@ -93,7 +92,7 @@ inline Reading read_report(const Outcome& outcome) {
     return table;
 }
 
-constexpr std::array answer_table{
+inline constexpr std::array answer_table{
     AnswerRow{"sentence", "", AnswerKind::text, "One sentence for the report: estimate, limits, p, n, test.",
               every_data_study, [](const Outcome& o) -> Reading { return sentence(o); }},
     AnswerRow{
@@ -177,5 +176,4 @@ constexpr std::array answer_table{
               [](const Outcome&) -> Reading { return std::string(build_line); }},
 };
 
-} // namespace
-} // namespace rankstead
+} // namespace rankstead::rows

@@ -51,7 +51,7 @@ template <class Study, class Answers>
 constexpr bool studies_are_sound(const Study& studies, const Answers& answers) {
     for (const StudyRow& study : studies) {
         const AnswerRow* standard = find_row(answers, study.default_answer);
-        if (!is_filled(study.function) || study.run == nullptr || standard == nullptr ||
+        if (!is_filled(study.function) || standard == nullptr ||
             (standard->fits & only(study.id)) == 0 || !words_are_sound(study.arguments)) {
             return false;
         }
@@ -63,7 +63,7 @@ template <class Answers>
 constexpr bool answers_are_sound(const Answers& answers) {
     for (const AnswerRow& row : answers) {
         const bool alias_taken = is_filled(row.alias) && find_row(answers, row.alias) != nullptr;
-        if (row.read == nullptr || row.fits == 0 || alias_taken) {
+        if (row.fits == 0 || alias_taken) {
             return false;
         }
     }
@@ -73,8 +73,7 @@ constexpr bool answers_are_sound(const Answers& answers) {
 template <class Rows>
 constexpr bool settings_are_sound(const Rows& settings) {
     for (const SettingRow& row : settings) {
-        if (row.apply == nullptr || row.show == nullptr || row.fits == 0 || !is_filled(row.values) ||
-            row.standard == nullptr) {
+        if (row.fits == 0 || !is_filled(row.values) || row.standard == nullptr) {
             return false;
         }
     }

@@ -7,12 +7,11 @@
 #include <algorithm>
 #include <array>
 
-namespace rankstead {
-namespace {
+namespace rankstead::rows {
 
-constexpr Studies one_sample_studies = only(StudyId::single) | only(StudyId::pairs);
-constexpr Studies data_studies = one_sample_studies | only(StudyId::groups);
-constexpr Studies named_second = only(StudyId::pairs) | only(StudyId::groups);
+inline constexpr Studies one_sample_studies = only(StudyId::single) | only(StudyId::pairs);
+inline constexpr Studies data_studies = one_sample_studies | only(StudyId::groups);
+inline constexpr Studies named_second = only(StudyId::pairs) | only(StudyId::groups);
 
 // Words in the order of the enumeration, as listed in the row.
 template <auto Member>
@@ -94,7 +93,7 @@ std::string show_decimal(const Settings& settings, const SettingRow& /*row*/) {
     return (settings.*Member).to_text();
 }
 
-constexpr std::array setting_table{
+inline constexpr std::array setting_table{
     SettingRow{
         "side", "two-sided, higher, lower", "two-sided",
         "The question: either way, or only whether the first is higher than the second, after higher than before, "
@@ -146,5 +145,4 @@ constexpr std::array setting_table{
                apply_text<&Settings::second_name>, show_text<&Settings::second_name>},
 };
 
-} // namespace
-} // namespace rankstead
+} // namespace rankstead::rows
