@@ -194,8 +194,8 @@ const AnswerRow* find_answer(std::string_view label) {
 const AnswerRow& answer_of(const StudyRow& study, std::string_view label) {
     const AnswerRow* row = find_answer(trimmed(label).empty() ? study.default_answer : label);
     if (row == nullptr || !fits(row->fits, study)) {
-        throw Refusal(Status::unknown_answer, "there is no answer \"" + std::string(trimmed(label)) + "\" " +
-                                                  (row == nullptr ? "" : "of " + std::string(study.word)) +
+        throw Refusal(Status::unknown_answer, "there is no answer \"" + std::string(trimmed(label)) + "\"" +
+                                                  (row == nullptr ? "" : " of " + std::string(study.word)) +
                                                   ". The answers are " + words_fitting(answers(), study) + ".");
     }
     return *row;

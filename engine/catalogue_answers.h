@@ -8,14 +8,20 @@
 #include "wording.h"
 
 #include <array>
+#include <cmath>
 
 namespace rankstead::rows {
 
 inline constexpr Studies every_data_study = only(StudyId::single) | only(StudyId::pairs) | only(StudyId::groups);
 inline constexpr Studies two_samples = only(StudyId::pairs) | only(StudyId::groups);
 
+// A difference of two doubles can be beyond the largest.
+inline Reading reading(double number) {
+    return std::isfinite(number) ? Reading(number) : Reading(NoAnswer{"this number is too large to be written."});
+}
+
 inline Reading reading(const Figure& figure) {
-    return figure.value ? Reading(*figure.value) : Reading(NoAnswer{figure.reason});
+    return figure.value ? reading(*figure.value) : Reading(NoAnswer{figure.reason});
 }
 
 inline Reading reading(const std::string& text) {
@@ -24,7 +30,7 @@ inline Reading reading(const std::string& text) {
 
 template <auto Member>
 Reading number(const Outcome& outcome) {
-    return static_cast<double>(outcome.*Member);
+    return reading(static_cast<double>(outcome.*Member));
 }
 
 template <auto Member>

@@ -150,7 +150,11 @@ std::optional<Decimal> Decimal::from_text(std::string_view text, char sign) {
 double nearest_double(const std::string& digits, int exponent) {
     const std::string text = digits + "e" + std::to_string(exponent);
     double value = 0;
-    std::from_chars(text.data(), text.data() + text.size(), value);
+    const auto read = std::from_chars(text.data(), text.data() + text.size(), value);
+    // Beyond the largest double from_chars leaves the value alone; below the smallest, 0 is right.
+    if (read.ec == std::errc::result_out_of_range && static_cast<int>(digits.size()) + exponent > 0) {
+        return digits.front() == '-' ? -HUGE_VAL : HUGE_VAL;
+    }
     return value;
 }
 

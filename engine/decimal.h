@@ -32,7 +32,7 @@ struct Decimal {
 // Digits in |coefficient|; 1 for zero.
 [[nodiscard]] int digit_count(std::int64_t coefficient);
 
-// `coefficient` digits (with sign) times 10^exponent, rounded once to the nearest double.
+// `coefficient` digits (with sign) times 10^exponent, rounded once to the nearest double; infinite beyond the largest.
 [[nodiscard]] double nearest_double(const std::string& digits, int exponent);
 
 // The shortest text that reads back as this double; "-0" is "0".
