@@ -1,0 +1,92 @@
+// How much memory a call takes, and what becomes of it when there is none. Built without sanitizers only: their own
+// bookkeeping would be measured.
+#include "inquiry.h"
+#include "random_data.h"
+
+#include <gtest/gtest.h>
+
+#include <sys/resource.h>
+#include <sys/wait.h>
+#include <unistd.h>
+
+#include <fstream>
+#include <string>
+
+namespace rks_test {
+namespace {
+
+// The highest resident memory since the last reset, in bytes.
+std::size_t peak_memory() {
+    std::ifstream status("/proc/self/status");
+    for (std::string word; status >> word;)
+        if (word == "VmHWM:") {
+            std::size_t kilobytes = 0;
+            status >> kilobytes;
+            return 1024 * kilobytes;
+        }
+    return 0;
+}
+
+void reset_peak_memory() {
+    std::ofstream("/proc/self/clear_refs") << 5;
+}
+
+std::size_t peak_of(Inquiry& inquiry) {
+    reset_peak_memory();
+    const auto before = peak_memory();
+    inquiry.run();
+    return peak_memory() - before;
+}
+
+TEST(Memory, a_thousand_values_a_side_take_less_than_64_megabytes) {
+    for (const std::int64_t levels : {std::int64_t{3}, std::int64_t{60}, std::int64_t{100000000}})
+        for (const char* method : {"auto", "exact"}) {
+            Inquiry groups("groups"), pairs("pairs");
+            groups.numbers("first", random_tenths(7, 1000, levels));
+            groups.numbers("second", random_tenths(8, 1000, levels));
+            groups.set("method", method);
+            pairs.numbers("before", random_tenths(7, 1000, levels));
+            pairs.numbers("after", random_tenths(8, 1000, levels));
+            pairs.set("method", method);
+            EXPECT_LT(peak_of(groups), std::size_t{64} << 20) << levels << ' ' << method;
+            EXPECT_LT(peak_of(pairs), std::size_t{64} << 20) << levels << ' ' << method;
+        }
+}
+
+TEST(Memory, a_million_values_a_side_take_less_than_half_a_gigabyte) {
+    Inquiry inquiry("groups");
+    inquiry.numbers("first", random_tenths(1, million, 100000));
+    inquiry.numbers("second", random_tenths(2, million, 100000));
+    EXPECT_LT(peak_of(inquiry), std::size_t{512} << 20);
+}
+
+// Runs in a child process with hardly any memory left; its exit status is the status of the run.
+int status_with_little_memory(std::size_t spare) {
+    const pid_t child = fork();
+    if (child == 0) {
+        Inquiry inquiry("groups");
+        inquiry.numbers("first", random_tenths(1, million, 100000));
+        inquiry.numbers("second", random_tenths(2, million, 100000));
+        std::ifstream size("/proc/self/statm");
+        std::size_t pages = 0;
+        size >> pages;
+        const rlim_t bytes = pages * static_cast<std::size_t>(sysconf(_SC_PAGESIZE)) + spare;
+        const rlimit limit = {bytes, bytes};
+        setrlimit(RLIMIT_AS, &limit);
+        _exit(inquiry.run());
+    }
+    int ended = 0;
+    waitpid(child, &ended, 0);
+    return WIFEXITED(ended) ? WEXITSTATUS(ended) : -1;
+}
+
+TEST(Memory, without_memory_there_is_a_status_and_no_crash) {
+    EXPECT_EQ(status_with_little_memory(std::size_t{1} << 20), RKS_OUT_OF_MEMORY);
+    for (const std::size_t megabytes : {8U, 32U, 64U, 1024U}) {
+        const int status = status_with_little_memory(megabytes << 20);
+        EXPECT_TRUE(status == RKS_OUT_OF_MEMORY || status == RKS_OK || status == RKS_TOO_LARGE) << status;
+    }
+}
+
+} // namespace
+} // namespace rks_test
