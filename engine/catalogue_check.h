@@ -3,6 +3,7 @@
 
 #include "catalogue.h"
 
+#include <cstddef>
 #include <string_view>
 
 namespace rankstead {
@@ -37,22 +38,23 @@ constexpr bool words_are_sound(const Rows& rows) {
     return true;
 }
 
+// The index of the row of that word, or the number of rows. No pointer: compared with null it is no constant for g++
+// under UndefinedBehaviorSanitizer.
 template <class Answers>
-constexpr const AnswerRow* find_row(const Answers& answers, std::string_view word) {
-    for (const AnswerRow& row : answers) {
-        if (word == row.word) {
-            return &row;
-        }
+constexpr std::size_t find_row(const Answers& answers, std::string_view word) {
+    std::size_t i = 0;
+    while (i < answers.size() && word != answers[i].word) {
+        ++i;
     }
-    return nullptr;
+    return i;
 }
 
 template <class Study, class Answers>
 constexpr bool studies_are_sound(const Study& studies, const Answers& answers) {
     for (const StudyRow& study : studies) {
-        const AnswerRow* standard = find_row(answers, study.default_answer);
-        if (!is_filled(study.function) || standard == nullptr ||
-            (standard->fits & only(study.id)) == 0 || !words_are_sound(study.arguments)) {
+        const std::size_t standard = find_row(answers, study.default_answer);
+        if (!is_filled(study.function) || standard == answers.size() ||
+            (answers[standard].fits & only(study.id)) == 0 || !words_are_sound(study.arguments)) {
             return false;
         }
     }
@@ -62,7 +64,7 @@ constexpr bool studies_are_sound(const Study& studies, const Answers& answers) {
 template <class Answers>
 constexpr bool answers_are_sound(const Answers& answers) {
     for (const AnswerRow& row : answers) {
-        const bool alias_taken = is_filled(row.alias) && find_row(answers, row.alias) != nullptr;
+        const bool alias_taken = is_filled(row.alias) && find_row(answers, row.alias) != answers.size();
         if (row.fits == 0 || alias_taken) {
             return false;
         }

@@ -52,7 +52,8 @@ std::string NumberWriter::signed_decimals(std::string text) const {
     if (sign_ == DecimalSign::comma) {
         std::replace(text.begin(), text.end(), '.', ',');
     }
-    return text;
+    // A minus sign proper (U+2212): a line may break after a hyphen and leave the sign behind.
+    return text.front() == '-' ? "\xE2\x88\x92" + text.substr(1) : text;
 }
 
 std::string NumberWriter::number(double value) const {

@@ -15,7 +15,7 @@ class NumberWriter {
 public:
     explicit NumberWriter(DecimalSign sign) : sign_(sign) {}
 
-    // Up to six significant digits, the whole part in full: "12.5", "1234567".
+    // Up to six significant digits, the whole part in full: "12.5", "1234567". Negative numbers have a true minus sign.
     [[nodiscard]] std::string number(double value) const;
     // "1,024"
     [[nodiscard]] std::string count(std::uint64_t value) const;

@@ -4,6 +4,7 @@
 #include "words.h"
 
 #include <algorithm>
+#include <charconv>
 
 namespace rankstead::client {
 namespace {
@@ -90,6 +91,25 @@ std::string CommandLine::needed(const std::string& option) const {
         throw usage_failure("--" + option + " is missing." + see_help());
     }
     return *value;
+}
+
+std::size_t CommandLine::count(const std::string& option) const {
+    const std::string text = needed(option);
+    std::size_t count = 0;
+    const auto [end, error] = std::from_chars(text.data(), text.data() + text.size(), count);
+    if (error != std::errc{} || end != text.data() + text.size()) {
+        throw usage_failure("--" + option + " takes a whole number, not " + in_quotes(text) + '.');
+    }
+    return count;
+}
+
+double CommandLine::number(const std::string& option) const {
+    const std::string text = needed(option);
+    const std::optional<double> number = decimal(text);
+    if (!number) {
+        throw usage_failure("--" + option + " takes a number with a decimal point, not " + in_quotes(text) + '.');
+    }
+    return *number;
 }
 
 } // namespace rankstead::client

@@ -3,6 +3,7 @@
 
 #include <cxxopts.hpp>
 
+#include <cstddef>
 #include <optional>
 #include <string>
 #include <utility>
@@ -21,6 +22,10 @@ public:
     // The value of an option that may be given once.
     std::optional<std::string> one(const std::string& option) const;
     std::string needed(const std::string& option) const;
+
+    // The same, as a whole number or a decimal with a point.
+    std::size_t count(const std::string& option) const;
+    double number(const std::string& option) const;
 
     // Everything that is neither an option nor the value of one.
     const std::vector<std::string>& rest() const { return rest_; }

@@ -6,7 +6,6 @@
 #include "study_options.h"
 #include "words.h"
 
-#include <charconv>
 #include <cmath>
 
 namespace rankstead::client {
@@ -50,25 +49,6 @@ cxxopts::Options options_for(const Question& question, const Law& law) {
     return options;
 }
 
-std::size_t count_from(const CommandLine& line, const std::string& option) {
-    const std::string text = line.needed(option);
-    std::size_t count = 0;
-    const auto [end, error] = std::from_chars(text.data(), text.data() + text.size(), count);
-    if (error != std::errc{} || end != text.data() + text.size()) {
-        throw usage_failure("--" + option + " takes a whole number, not " + in_quotes(text) + '.');
-    }
-    return count;
-}
-
-double number_from(const CommandLine& line, const std::string& option) {
-    const std::string text = line.needed(option);
-    const std::optional<double> number = decimal(text);
-    if (!number) {
-        throw usage_failure("--" + option + " takes a number with a decimal point, not " + in_quotes(text) + '.');
-    }
-    return *number;
-}
-
 // A question with its numbers, as given.
 struct Asked {
     const Question& question;
@@ -81,9 +61,9 @@ struct Asked {
 Asked asked(const Question& question, const Law& law, const CommandLine& line) {
     Asked result{question, law, {}, 0.0, line.one("side").value_or("two-sided")};
     for (const SizeOption& size : law.sizes) {
-        result.sizes.push_back(count_from(line, size.option));
+        result.sizes.push_back(line.count(size.option));
     }
-    result.given = number_from(line, question.given);
+    result.given = line.number(question.given);
     return result;
 }
 

@@ -4,6 +4,7 @@
 #include "long_layout.h"
 #include "report_json.h"
 #include "report_text.h"
+#include "request.h"
 #include "study_options.h"
 #include "words.h"
 
@@ -11,56 +12,6 @@
 
 namespace rankstead::client {
 namespace {
-
-// Everything that a study is asked, before any file is opened.
-struct Request {
-    Study study;
-    OptionNames names;
-    CommandLine line;
-    std::vector<Answer> answers; // those asked for by --answer
-
-    bool takes_file() const { return !names.data.empty(); }
-};
-
-Answer needed_answer(const Study& study, const std::string& word) {
-    const std::optional<Answer> answer = find_answer(study, word);
-    if (!answer) {
-        throw usage_failure(study.word + " has no answer " + in_quotes(word) + ". Its answers are " +
-                            joined(words_of(answers_of(study)), ", ") + '.');
-    }
-    return *answer;
-}
-
-Request request(const Study& study, const std::vector<std::string>& arguments) {
-    OptionNames names = option_names_of(study);
-    cxxopts::Options options = study_options(study, names);
-    CommandLine line(options, arguments, help_command(study));
-    std::vector<Answer> answers;
-    for (const std::string& word : line.all("answer")) {
-        answers.push_back(needed_answer(study, word));
-    }
-    return {study, std::move(names), std::move(line), std::move(answers)};
-}
-
-void refuse_wrong_files(const Request& asked) {
-    const std::vector<std::string>& rest = asked.line.rest();
-    const std::size_t wanted = asked.takes_file() ? 1 : 0;
-    if (rest.size() > wanted) {
-        throw usage_failure(in_quotes(rest[wanted]) + " is neither an option nor the file." + asked.line.see_help());
-    }
-    if (rest.size() < wanted) {
-        throw usage_failure("Name the CSV file to read, or - for standard input." + asked.line.see_help());
-    }
-}
-
-void refuse_no_data_option(const Request& asked) {
-    const bool any = std::any_of(asked.names.data.begin(), asked.names.data.end(),
-                                 [&](const OptionName& name) { return asked.line.has(name.option); });
-    if (!any) {
-        throw usage_failure("Say which columns to use: rankstead " + synopsis(asked.study, asked.names) + '.' +
-                            asked.line.see_help());
-    }
-}
 
 // Long only where the study has that layout: elsewhere --values may be the name of an argument.
 Selection selection(const Request& asked, const Table& table) {
@@ -162,7 +113,7 @@ Exit answer(const Request& asked, const Console& console) {
 } // namespace
 
 Exit run_study(const Study& study, const std::vector<std::string>& arguments, const Console& console) {
-    const Request asked = request(study, arguments);
+    const Request asked = request_for(study, arguments);
     if (!asked.line.has("help")) {
         return answer(asked, console);
     }

@@ -4,28 +4,38 @@
 
 #include <gtest/gtest.h>
 
+#include <algorithm>
 #include <map>
-#include <regex>
+#include <sstream>
 
 namespace rks_test {
 namespace {
 
 using Account = std::map<std::string, long>; // "seen" -> 20, "used" -> 17, ...
 
-// "first: 20 seen = 17 used + 2 blank + 1 text + 0 censored + 0 unpaired (...); second: ...", numbers before or
-// after their words.
+// "20 seen = 17 used + 2 blank + 1 text + 0 censored + 0 unpaired (text: ...)": numbers, each before its word.
+Account read_account(std::string part) {
+    part.erase(std::min(part.find('('), part.size()));
+    part.erase(std::remove(part.begin(), part.end(), ','), part.end());
+    for (char& letter : part)
+        if (letter == '=' || letter == '+')
+            letter = ' ';
+    std::istringstream words(part);
+    Account account;
+    std::string word;
+    for (long number = 0; words >> number >> word;)
+        account[word] = number;
+    return account;
+}
+
+// "first: 20 seen = ...; second: ..."
 std::map<std::string, Account> read_ledger(const std::string& ledger) {
     std::map<std::string, Account> accounts;
-    static const std::regex argument("(before|after|first|second|values|reference):([^;(]*)");
-    static const std::regex entry("([\\d,]+) +([a-z]+)|([a-z]+) +([\\d,]+)");
-    for (std::sregex_iterator part(ledger.begin(), ledger.end(), argument), end; part != end; ++part) {
-        const std::string body = (*part)[2];
-        for (std::sregex_iterator item(body.begin(), body.end(), entry); item != end; ++item) {
-            const bool number_first = (*item)[1].matched;
-            std::string digits = number_first ? (*item)[1] : (*item)[4];
-            digits.erase(std::remove(digits.begin(), digits.end(), ','), digits.end());
-            accounts[(*part)[1]][number_first ? (*item)[2] : (*item)[3]] = std::stol(digits);
-        }
+    std::istringstream parts(ledger);
+    for (std::string part; std::getline(parts >> std::ws, part, ';');) {
+        const auto colon = part.find(':');
+        if (colon != std::string::npos)
+            accounts[part.substr(0, colon)] = read_account(part.substr(colon + 1));
     }
     return accounts;
 }

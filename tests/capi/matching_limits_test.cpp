@@ -6,8 +6,8 @@
 
 #include <algorithm>
 #include <cmath>
-#include <regex>
 #include <set>
+#include <sstream>
 
 namespace rks_test {
 namespace {
@@ -70,20 +70,31 @@ bool is_one_of_the_differences(const Trial& trial, std::int64_t margin) {
     return false;
 }
 
-// Whether the notes say that p and the limits disagree at this margin, written as briefly as it can be.
-bool notes_name(const Inquiry& inquiry, std::int64_t margin) {
+// A margin written as briefly as it can be.
+std::string brief(std::int64_t margin) {
     std::string number = decimal_text(margin, 40);
     number.erase(number.find_last_not_of('0') + 1);
     if (number.back() == '.')
         number.pop_back();
-    const auto notes = inquiry.text("notes");
-    const std::regex sentence("zeros=drop, p and the limits disagree at exactly ([^;]*), because");
-    std::smatch found;
-    if (!std::regex_search(notes, found, sentence))
+    return number;
+}
+
+// Whether the notes say that p and the limits disagree at this margin: it is one of the numbers listed there.
+bool notes_name(const Inquiry& inquiry, std::int64_t margin) {
+    const std::string before = "p and the limits disagree at exactly ", after = ", because",
+                      notes = inquiry.text("notes");
+    const auto start = notes.find(before);
+    if (start == std::string::npos)
         return false;
-    const std::regex whole("(^|[^-.0-9])" + std::regex_replace(number, std::regex("\\."), "\\.") + "([^.0-9]|\\.?$)");
-    const std::string list = found[1];
-    return std::regex_search(list, whole);
+    const auto end = notes.find(after, start);
+    std::istringstream list(notes.substr(start + before.size(), end - start - before.size()));
+    for (std::string number; list >> number;) {
+        if (number.back() == ',')
+            number.pop_back();
+        if (number == brief(margin))
+            return true;
+    }
+    return false;
 }
 
 // Returns 1 if the margin contradicts the limits but is excused and named in the notes.

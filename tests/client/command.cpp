@@ -13,7 +13,7 @@ namespace rankstead::client_tests {
 namespace {
 
 struct Close {
-    void operator()(std::FILE* file) const { std::fclose(file); }
+    void operator()(std::FILE* file) const { static_cast<void>(std::fclose(file)); }
 };
 using File = std::unique_ptr<std::FILE, Close>;
 
@@ -27,7 +27,9 @@ File scratch_file() {
 
 File file_with(const std::string& text) {
     File file = scratch_file();
-    std::fwrite(text.data(), 1, text.size(), file.get());
+    if (std::fwrite(text.data(), 1, text.size(), file.get()) != text.size()) {
+        throw std::runtime_error("the scratch file is full");
+    }
     std::rewind(file.get());
     return file;
 }
@@ -60,6 +62,7 @@ private:
 
 int run(std::vector<std::string> words, const FileActions& actions) {
     std::vector<char*> arguments;
+    arguments.reserve(words.size() + 1);
     for (std::string& word : words) {
         arguments.push_back(word.data());
     }

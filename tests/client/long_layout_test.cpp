@@ -14,15 +14,19 @@ Words with(Words words, const Words& more) {
     return words;
 }
 
-const Words layout{"--values", "minutes", "--labels", "period"};
-const Words periods{"--before", "before", "--after", "after"};
+Words layout() {
+    return {"--values", "minutes", "--labels", "period"};
+}
+Words periods() {
+    return {"--before", "before", "--after", "after"};
+}
 
 Outcome groups(const Words& more) {
-    return rankstead(with(with({"groups", "groups_long.csv"}, layout), more));
+    return rankstead(with(with({"groups", "groups_long.csv"}, layout()), more));
 }
 
 Outcome pairs(const std::string& file, const Words& more) {
-    return rankstead(with(with(with({"pairs", file}, layout), periods), more));
+    return rankstead(with(with(with({"pairs", file}, layout()), periods()), more));
 }
 
 TEST(LongLayout, GroupsByLabel) {

@@ -8,6 +8,7 @@ namespace {
 
 std::vector<std::string> options(const std::vector<OptionName>& names) {
     std::vector<std::string> result;
+    result.reserve(names.size());
     for (const OptionName& name : names) {
         result.push_back(name.option);
     }

@@ -21,10 +21,12 @@ std::vector<std::string> lines(const std::string& text) {
     return result;
 }
 
-const std::vector<std::string> groups{"groups", "groups.csv", "--first", "old", "--second", "new"};
+std::vector<std::string> groups() {
+    return {"groups", "groups.csv", "--first", "old", "--second", "new"};
+}
 
 TEST(Report, HoldsLabelsAndValues) {
-    const Outcome outcome = rankstead(groups);
+    const Outcome outcome = rankstead(groups());
     EXPECT_EQ(outcome.status, 0);
     EXPECT_EQ(outcome.err, "");
     EXPECT_TRUE(contains(outcome.out, "\nestimate "));
@@ -40,7 +42,7 @@ std::size_t value_column(const std::string& line) {
 
 TEST(Report, ValuesBeginInOneColumn) {
     std::vector<std::size_t> columns;
-    for (const std::string& line : lines(rankstead(groups).out)) {
+    for (const std::string& line : lines(rankstead(groups()).out)) {
         if (line.empty()) {
             break;
         }
@@ -53,13 +55,13 @@ TEST(Report, ValuesBeginInOneColumn) {
 }
 
 TEST(Report, NoLineEndsInBlanks) {
-    for (const std::string& line : lines(rankstead(groups).out)) {
+    for (const std::string& line : lines(rankstead(groups()).out)) {
         EXPECT_FALSE(line.ends_with(' ')) << line;
     }
 }
 
 TEST(Report, LinesFitAPage) {
-    for (const std::string& line : lines(rankstead(groups).out)) {
+    for (const std::string& line : lines(rankstead(groups()).out)) {
         if (line != rks_caution_line()) {
             EXPECT_LE(client::character_count(line), 100U) << line;
         }
@@ -67,7 +69,7 @@ TEST(Report, LinesFitAPage) {
 }
 
 TEST(Report, EndsWithTheCaution) {
-    EXPECT_EQ(lines(rankstead(groups).out).back(), rks_caution_line());
+    EXPECT_EQ(lines(rankstead(groups()).out).back(), rks_caution_line());
 }
 
 TEST(Report, GivesTheReasonWhereANumberDoesNotExist) {
@@ -84,7 +86,7 @@ TEST(Report, TellsWhichRowsWereLeftOut) {
 }
 
 TEST(Report, AsATableAnswer) {
-    std::vector<std::string> words = groups;
+    std::vector<std::string> words = groups();
     words.insert(words.end(), {"--answer", "report"});
     const Outcome outcome = rankstead(words);
     EXPECT_EQ(outcome.status, 0) << outcome.err;

@@ -25,9 +25,15 @@ std::string text(Words words, const std::string& answer) {
     return outcome.out;
 }
 
-const Words groups{"groups", "groups.csv", "--first", "old", "--second", "new"};
-const Words pairs{"pairs", "pairs.csv", "--before", "before", "--after", "after"};
-const Words single{"single", "single.csv", "--values", "minutes", "--reference", "10"};
+Words groups() {
+    return {"groups", "groups.csv", "--first", "old", "--second", "new"};
+}
+Words pairs() {
+    return {"pairs", "pairs.csv", "--before", "before", "--after", "after"};
+}
+Words single() {
+    return {"single", "single.csv", "--values", "minutes", "--reference", "10"};
+}
 
 Words with(Words words, const Words& more) {
     words.insert(words.end(), more.begin(), more.end());
@@ -35,25 +41,25 @@ Words with(Words words, const Words& more) {
 }
 
 TEST(Studies, TwoGroups) {
-    EXPECT_NEAR(number(groups, "p"), groups_p, 1e-15);
-    EXPECT_EQ(number(groups, "estimate"), groups_estimate);
-    EXPECT_EQ(number(groups, "lower"), groups_lower);
-    EXPECT_EQ(number(groups, "upper"), groups_upper);
-    EXPECT_EQ(number(groups, "n second"), 7);
+    EXPECT_NEAR(number(groups(), "p"), groups_p, 1e-15);
+    EXPECT_EQ(number(groups(), "estimate"), groups_estimate);
+    EXPECT_EQ(number(groups(), "lower"), groups_lower);
+    EXPECT_EQ(number(groups(), "upper"), groups_upper);
+    EXPECT_EQ(number(groups(), "n second"), 7);
 }
 
 TEST(Studies, Pairs) {
-    EXPECT_NEAR(number(pairs, "p"), pairs_p, 1e-15);
-    EXPECT_EQ(number(pairs, "estimate"), pairs_estimate);
-    EXPECT_EQ(number(pairs, "lower"), pairs_lower);
-    EXPECT_EQ(number(pairs, "upper"), pairs_upper);
+    EXPECT_NEAR(number(pairs(), "p"), pairs_p, 1e-15);
+    EXPECT_EQ(number(pairs(), "estimate"), pairs_estimate);
+    EXPECT_EQ(number(pairs(), "lower"), pairs_lower);
+    EXPECT_EQ(number(pairs(), "upper"), pairs_upper);
 }
 
 TEST(Studies, OneGroupAgainstANumber) {
-    EXPECT_NEAR(number(single, "p"), pairs_p, 1e-15);
-    EXPECT_EQ(number(single, "estimate"), single_estimate);
-    EXPECT_EQ(number(single, "lower"), single_lower);
-    EXPECT_EQ(number(single, "upper"), single_upper);
+    EXPECT_NEAR(number(single(), "p"), pairs_p, 1e-15);
+    EXPECT_EQ(number(single(), "estimate"), single_estimate);
+    EXPECT_EQ(number(single(), "lower"), single_lower);
+    EXPECT_EQ(number(single(), "upper"), single_upper);
 }
 
 TEST(Studies, OneGroupAgainstTheNumberOfAColumn) {
@@ -64,8 +70,8 @@ TEST(Studies, OneGroupAgainstTheNumberOfAColumn) {
 TEST(Studies, NegativeNumbersAreValuesOfOptions) {
     const Words words{"single", "single.csv", "--values", "minutes", "--reference", "-2.5"};
     EXPECT_NEAR(number(words, "p"), 2.0 / 1024, 1e-15);
-    EXPECT_NEAR(number(with(pairs, {"--margin", "-60"}), "p"), 2.0 / 1024, 1e-15);
-    EXPECT_NEAR(number(with(pairs, {"--margin=-60"}), "p"), 2.0 / 1024, 1e-15);
+    EXPECT_NEAR(number(with(pairs(), {"--margin", "-60"}), "p"), 2.0 / 1024, 1e-15);
+    EXPECT_NEAR(number(with(pairs(), {"--margin=-60"}), "p"), 2.0 / 1024, 1e-15);
 }
 
 TEST(Studies, AColumnMayHaveANumberAsHeading) {
@@ -73,35 +79,37 @@ TEST(Studies, AColumnMayHaveANumberAsHeading) {
 }
 
 TEST(Studies, SettingsAreOptions) {
-    EXPECT_NEAR(number(with(groups, {"--side", "higher"}), "p"), groups_p_higher, 1e-15);
-    EXPECT_NE(number(with(groups, {"--chance-interval", "newcombe"}), "chance lower"), number(groups, "chance lower"));
-    EXPECT_TRUE(contains(text(with(groups, {"--unit", "minutes"}), "sentence"), "minutes"));
+    EXPECT_NEAR(number(with(groups(), {"--side", "higher"}), "p"), groups_p_higher, 1e-15);
+    EXPECT_NE(number(with(groups(), {"--chance-interval", "newcombe"}), "chance lower"),
+              number(groups(), "chance lower"));
+    EXPECT_TRUE(contains(text(with(groups(), {"--unit", "minutes"}), "sentence"), "minutes"));
 }
 
 TEST(Studies, HeadingsNameTheGroups) {
-    const std::string sentence = text(groups, "sentence");
+    const std::string sentence = text(groups(), "sentence");
     EXPECT_TRUE(contains(sentence, "old"));
     EXPECT_TRUE(contains(sentence, "new"));
 }
 
 TEST(Studies, NamesOnTheCommandLineComeFirst) {
-    const std::string sentence = text(with(groups, {"--first-name", "paper form", "--second-name=tablet"}), "sentence");
+    const std::string sentence =
+        text(with(groups(), {"--first-name", "paper form", "--second-name=tablet"}), "sentence");
     EXPECT_TRUE(contains(sentence, "paper form"));
     EXPECT_TRUE(contains(sentence, "tablet"));
 }
 
 TEST(Studies, SeveralAnswersInTheOrderAsked) {
-    const Outcome outcome = rankstead(with(groups, {"--answer", "estimate", "--answer", "n first", "--answer", "n"}));
+    const Outcome outcome = rankstead(with(groups(), {"--answer", "estimate", "--answer", "n first", "--answer", "n"}));
     EXPECT_EQ(outcome.out, "4.75\n8\n15\n");
 }
 
 TEST(Studies, AnswersByOtherSpellings) {
-    EXPECT_EQ(text(groups, "P value"), text(groups, "p"));
-    EXPECT_EQ(text(groups, "chance-lower"), text(groups, "chance lower"));
+    EXPECT_EQ(text(groups(), "P value"), text(groups(), "p"));
+    EXPECT_EQ(text(groups(), "chance-lower"), text(groups(), "chance lower"));
 }
 
 TEST(Studies, AnAnswerThatIsBlankOnPurposeIsAnEmptyLine) {
-    const Outcome outcome = rankstead(with(groups, {"--answer", "z"}));
+    const Outcome outcome = rankstead(with(groups(), {"--answer", "z"}));
     EXPECT_EQ(outcome.status, 0);
     EXPECT_EQ(outcome.out, "\n");
     EXPECT_EQ(outcome.err, "");

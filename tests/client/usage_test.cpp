@@ -10,10 +10,12 @@ namespace {
 
 using Words = std::vector<std::string>;
 
-const Words groups{"groups", "groups.csv", "--first", "old", "--second", "new"};
+Words groups() {
+    return {"groups", "groups.csv", "--first", "old", "--second", "new"};
+}
 
 Outcome groups_with(const Words& more) {
-    Words words = groups;
+    Words words = groups();
     words.insert(words.end(), more.begin(), more.end());
     return rankstead(words);
 }

@@ -208,7 +208,7 @@ TEST(Notes, margins_at_which_dropping_a_zero_turns_p_around) {
     Outcome outcome = test::changes(quiet_changes);
     outcome.observations.exceptional_margins = {-1.5, 7.5};
     expect_only(outcome,
-                "With zeros=drop, p and the limits disagree at exactly -1.5, 7.5, because a value there becomes "
+                "With zeros=drop, p and the limits disagree at exactly −1.5, 7.5, because a value there becomes "
                 "a zero and is dropped. zeros=pratt has no such exception.");
 }
 

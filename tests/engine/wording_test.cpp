@@ -53,7 +53,7 @@ TEST(WriteP, uses_the_decimal_sign_asked_for) {
 TEST(WriteNumber, gives_up_to_six_significant_digits) {
     EXPECT_EQ(with_point.number(12.5), "12.5");
     EXPECT_EQ(with_point.number(1.0 / 3), "0.333333");
-    EXPECT_EQ(with_point.number(-0.00012345678), "-0.000123457");
+    EXPECT_EQ(with_point.number(-0.00012345678), "−0.000123457");
     EXPECT_EQ(with_point.number(2.50), "2.5");
 }
 
@@ -69,7 +69,7 @@ TEST(WriteNumber, has_no_minus_zero) {
 
 TEST(WriteNumber, is_scientific_at_the_extremes) {
     EXPECT_EQ(with_point.number(1e300), "1e+300");
-    EXPECT_EQ(with_point.number(-2.5e-7), "-2.5e-07");
+    EXPECT_EQ(with_point.number(-2.5e-7), "−2.5e-07");
 }
 
 TEST(WriteNumber, uses_the_decimal_sign_asked_for) {
@@ -121,8 +121,8 @@ TEST(Sentence, one_sided_higher_has_a_lower_limit) {
 
 TEST(Sentence, one_sided_lower_has_an_upper_limit) {
     EXPECT_EQ(sentence(test::changes({-1, -2, -3, -4, -5}, "side=lower; test=sign")),
-              "after against before in 5 pairs: the estimated change, after minus before, is -3 (95% confidence limit: "
-              "at most -1); p = 0.03, one-sided (lower) exact sign test.");
+              "after against before in 5 pairs: the estimated change, after minus before, is −3 (95% confidence limit: "
+              "at most −1); p = 0.03, one-sided (lower) exact sign test.");
 }
 
 TEST(Sentence, says_when_no_interval_exists) {
@@ -132,7 +132,7 @@ TEST(Sentence, says_when_no_interval_exists) {
 
 TEST(Sentence, names_the_margin) {
     const std::string words = sentence(test::groups({5, 6, 7, 8}, {1, 2, 3, 4}, "margin=-2.5; unit=cm"));
-    EXPECT_NE(words.find("rank sum test, against a margin of -2.5 cm."), std::string::npos) << words;
+    EXPECT_NE(words.find("rank sum test, against a margin of −2.5 cm."), std::string::npos) << words;
 }
 
 TEST(Sentence, says_that_p_is_approximate) {

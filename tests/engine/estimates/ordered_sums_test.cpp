@@ -147,6 +147,36 @@ TEST(OrderedSums, beyond_the_written_ones_at_every_k) {
     expect_order(OrderedSums<std::int64_t>::differences(x, y), every_difference(x, y), 7);
 }
 
+// At the ends the bracket found from a sample often misses, on either side and by one.
+TEST(OrderedSums, beyond_the_written_ones_at_every_k_near_the_ends) {
+    test::Random random(29);
+    for (const std::int64_t highest : {100'000, 60}) {
+        const auto d = drawn<std::int64_t>(random, 240, highest);
+        const auto all = every_walsh_sum(d);
+        const auto sums = OrderedSums<std::int64_t>::walsh(d);
+        for (std::int64_t k = 1; k <= 400; ++k) {
+            const auto from_above = static_cast<std::size_t>(sums.size() - k);
+            ASSERT_EQ(sums.at(k), all[static_cast<std::size_t>(k - 1)]) << k;
+            ASSERT_EQ(sums.at(sums.size() - k + 1), all[from_above]) << k << " from above";
+        }
+    }
+}
+
+// The last of each tie and the first of the next.
+TEST(OrderedSums, beyond_the_written_ones_at_every_edge_of_a_tie) {
+    test::Random random(30);
+    const auto x = drawn<std::int64_t>(random, 160, 90);
+    const auto y = drawn<std::int64_t>(random, 150, 90);
+    const auto all = every_difference(x, y);
+    const auto sums = OrderedSums<std::int64_t>::differences(x, y);
+    for (std::size_t k = 1; k < all.size(); ++k) {
+        if (all[k] != all[k - 1]) {
+            ASSERT_EQ(sums.at(static_cast<std::int64_t>(k)), all[k - 1]);
+            ASSERT_EQ(sums.at(static_cast<std::int64_t>(k) + 1), all[k]);
+        }
+    }
+}
+
 TEST(OrderedSums, of_very_unequal_samples) {
     test::Random random(27);
     const auto x = drawn<std::int64_t>(random, 3, 1000);
