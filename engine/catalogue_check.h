@@ -51,8 +51,8 @@ template <class Study, class Answers>
 constexpr bool studies_are_sound(const Study& studies, const Answers& answers) {
     for (const StudyRow& study : studies) {
         const AnswerRow* standard = find_row(answers, study.default_answer);
-        if (!is_filled(study.function) || standard == nullptr ||
-            (standard->fits & only(study.id)) == 0 || !words_are_sound(study.arguments)) {
+        if (!is_filled(study.function) || standard == nullptr || (standard->fits & only(study.id)) == 0 ||
+            !words_are_sound(study.arguments)) {
             return false;
         }
     }
