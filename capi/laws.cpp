@@ -3,6 +3,7 @@
 
 #include "decimal.h"
 #include "guard.h"
+#include "laws/exact_laws.h"
 #include "laws/rank_sum_law.h"
 #include "laws/signed_rank_law.h"
 
@@ -13,8 +14,7 @@ using namespace rankstead;
 
 namespace {
 
-constexpr double ceiling_seconds = 0.5;
-constexpr std::int64_t largest_sample = 100'000; // far beyond what the ceiling allows; keeps products within 64 bits
+constexpr std::int64_t largest_sample = 100'000; // what the time allowed permits; keeps products within 64 bits
 
 [[noreturn]] void refuse(Status status) {
     throw Refusal(status, "");
@@ -59,23 +59,14 @@ rks_status law_call(double* out, Work&& work) noexcept {
     *out = std::numeric_limits<double>::quiet_NaN();
     return guarded(
         [&] {
-            *out = work();
-            return Status::ok;
+            try {
+                *out = work();
+                return Status::ok;
+            } catch (const LawTooLong&) {
+                return Status::too_large;
+            }
         },
         [](const Refusal*, const std::string&) {});
-}
-
-UntiedSignedRankLaw signed_rank_law(std::int64_t n) {
-    if (signed_rank_cost(untied_sign_scores(n, n * (n + 1) / 4)) > ceiling_seconds) {
-        refuse(Status::too_large);
-    }
-    return UntiedSignedRankLaw(n);
-}
-
-void check_rank_sum_cost(std::int64_t first, std::int64_t second, int queries) {
-    if (UntiedRankSumLaw::cost(first, second, queries) > ceiling_seconds) {
-        refuse(Status::too_large);
-    }
 }
 
 // The largest statistic whose lower tail is at most the rate, by bisection; NaN if there is none. The laws are
@@ -98,19 +89,14 @@ double critical(const Law& law, std::int64_t largest, double alpha, Side side) {
     return static_cast<double>(side == Side::higher ? largest - within : within);
 }
 
-constexpr int critical_queries = 16;
-
 } // namespace
 
 rks_status rks_signed_rank_tail(size_t n, double statistic, int32_t side, double* p) {
     return law_call(p, [&] {
         const Side asked = side_of(side);
         const std::int64_t size = sample_size(n);
-        const SignScores scores = untied_sign_scores(size, whole_statistic(statistic, size * (size + 1) / 2));
-        if (signed_rank_cost(scores) > ceiling_seconds) {
-            refuse(Status::too_large);
-        }
-        return p_value(signed_rank_tails(scores), asked);
+        const std::int64_t sum = whole_statistic(statistic, size * (size + 1) / 2);
+        return p_value(exact_signed_rank_tails(untied_sign_scores(size, sum), seconds_for_p), asked);
     });
 }
 
@@ -119,9 +105,7 @@ rks_status rks_rank_sum_tail(size_t first, size_t second, double u, int32_t side
         const Side asked = side_of(side);
         const std::int64_t m = sample_size(first);
         const std::int64_t n = sample_size(second);
-        const std::int64_t statistic = whole_statistic(u, m * n);
-        check_rank_sum_cost(m, n, 1);
-        return p_value(UntiedRankSumLaw(m, n).at(statistic), asked);
+        return p_value(UntiedRankSumLaw(m, n).at(whole_statistic(u, m * n)), asked);
     });
 }
 
@@ -129,7 +113,7 @@ rks_status rks_signed_rank_critical(size_t n, double alpha, int32_t side, double
     return law_call(value, [&] {
         const Side asked = side_of(side);
         const std::int64_t size = sample_size(n);
-        return critical(signed_rank_law(size), size * (size + 1) / 2, alpha, asked);
+        return critical(UntiedSignedRankLaw(size), size * (size + 1) / 2, alpha, asked);
     });
 }
 
@@ -138,7 +122,6 @@ rks_status rks_rank_sum_critical(size_t first, size_t second, double alpha, int3
         const Side asked = side_of(side);
         const std::int64_t m = sample_size(first);
         const std::int64_t n = sample_size(second);
-        check_rank_sum_cost(m, n, critical_queries);
         return critical(UntiedRankSumLaw(m, n), m * n, alpha, asked);
     });
 }

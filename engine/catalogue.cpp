@@ -18,7 +18,8 @@ using rows::setting_table;
 
 constexpr std::array single_arguments{
     ArgumentRow{"values", "The measurements of one group: a column, a row or a block. A heading may come first."},
-    ArgumentRow{"reference", "The value to compare with, such as a target: one number. An empty cell given by itself counts as 0."},
+    ArgumentRow{"reference",
+                "The value to compare with, such as a target: one number. An empty cell given by itself counts as 0."},
 };
 constexpr std::array pairs_arguments{
     ArgumentRow{"before", "The first measurement of each person or item, one per row. A heading may come first."},

@@ -164,6 +164,15 @@ Column column_of(Slots&& slots) {
                                        std::to_string(ledger.seen) + " cells. Select cells that hold numbers.");
 }
 
+// A selection often reaches beyond the data; what is blank below the last filled cell is not a missing value.
+void drop_blanks_at_the_end(Block& block) {
+    const auto is_filled = [](const Cell& cell) {
+        return cell.kind == Cell::Kind::number || (cell.kind == Cell::Kind::text && !trimmed(cell.text).empty());
+    };
+    const auto last = std::find_if(block.cells.rbegin(), block.cells.rend(), is_filled);
+    block.cells.erase(last.base(), block.cells.end());
+}
+
 void check_headings(const Slots& first, const Slots& second, const Block& second_block, const Block& first_block) {
     const bool one = first.ledger.heading > 0 && second.ledger.heading == 0 && second.values.front().has_value();
     const bool other = second.ledger.heading > 0 && first.ledger.heading == 0 && first.values.front().has_value();
@@ -208,7 +217,9 @@ std::size_t count_equal_decimals(const Block& first, const Block& second) {
 } // namespace
 
 Column read_column(const Block& block, const Settings& settings) {
-    Column column = column_of(read_slots(block, settings));
+    Block filled = block;
+    drop_blanks_at_the_end(filled);
+    Column column = column_of(read_slots(filled, settings));
     if (column.values.empty()) {
         refuse_empty(column.ledger);
     }

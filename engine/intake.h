@@ -38,6 +38,7 @@ struct PairedColumns {
     std::size_t equal_at_fifteen_digits = 0; // pairs equal as decimals though not as binary numbers
 };
 
+// Cells that are blank after the last filled one are not counted: a selection often reaches beyond the data.
 // Throws Refusal (bad_data with the place, or no_data if not one value is left).
 [[nodiscard]] Column read_column(const Block& block, const Settings& settings);
 

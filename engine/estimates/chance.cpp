@@ -53,6 +53,18 @@ double satterthwaite_freedom(const PlacementVariances& variances, double m, doub
     return std::max(1.0, sum * sum / parts);
 }
 
+// Where in [0, 1] a condition that does not hold below and holds above begins. The inverse beta function of Boost.Math
+// gives up at some arguments; this never does.
+template <class Condition>
+double bisected(Condition holds) {
+    double below = 0;
+    double above = 1;
+    for (double middle = 0.5; below < middle && middle < above; middle = below + (above - below) / 2) {
+        (holds(middle) ? above : below) = middle;
+    }
+    return above;
+}
+
 double logistic(double x) {
     return 1 / (1 + std::exp(-x));
 }
@@ -108,10 +120,10 @@ Interval newcombe_interval(const PooledRanking& ranking, double rate) {
 Interval clopper_pearson_interval(double successes, double n, double rate) {
     Interval interval;
     if (successes > 0) {
-        interval.lower = boost::math::ibeta_inv(successes, n - successes + 1, rate);
+        interval.lower = bisected([&](double p) { return boost::math::ibeta(successes, n - successes + 1, p) >= rate; });
     }
     if (successes < n) {
-        interval.upper = boost::math::ibetac_inv(successes + 1, n - successes, rate);
+        interval.upper = bisected([&](double p) { return boost::math::ibetac(successes + 1, n - successes, p) <= rate; });
     }
     return interval;
 }

@@ -2,6 +2,7 @@
 
 #include "binomial_coefficient.h"
 #include "compensated_sum.h"
+#include "exact_laws.h"
 #include "split_up.h"
 
 #include <algorithm>
@@ -33,18 +34,12 @@ ChoiceScores reflected(const ChoiceScores& scores) {
     return result;
 }
 
-// Brings a law to the smaller sample and to the lower half, so that equal questions are one computation and the tail
-// that is summed is the smaller one. `swaps` says whether the tails change places.
-struct Canonical {
-    ChoiceScores scores;
-    bool swaps = false;
-    bool centred = false; // symmetric and at its centre: both tails are equal
-};
+} // namespace
 
-Canonical canonical(const ChoiceScores& scores) {
+CanonicalChoice canonical(const ChoiceScores& scores) {
     const auto n = static_cast<std::int64_t>(scores.scores.size());
     const std::int64_t sum = sum_of(scores.scores);
-    Canonical result{scores, false, false};
+    CanonicalChoice result{scores, false, false};
     if (2 * scores.chosen == n) {
         result.centred = 2 * scores.statistic == sum;
         if (2 * scores.statistic > sum) {
@@ -61,6 +56,8 @@ Canonical canonical(const ChoiceScores& scores) {
     }
     return result;
 }
+
+namespace {
 
 Tails counted(const ChoiceScores& scores, std::uint64_t total) {
     const auto mass = split_up_tail<std::uint64_t>(scores);
@@ -115,7 +112,7 @@ double rank_sum_cost(const ChoiceScores& scores) {
 }
 
 Tails rank_sum_tails(const ChoiceScores& scores) {
-    const Canonical law = canonical(scores);
+    const CanonicalChoice law = canonical(scores);
     const auto n = static_cast<std::int64_t>(scores.scores.size());
     const auto total = exact_choose(n, scores.chosen);
     constexpr UInt128 most_counted = UInt128{1} << 63;
@@ -130,8 +127,6 @@ Tails rank_sum_tails(const ChoiceScores& scores) {
 // ------------------------------------------------------------------------------------------------ without ties
 
 namespace {
-
-constexpr double seconds_per_wide_addition = 0.6e-9;
 
 // Coefficients of the Gaussian binomial [m+n choose m] up to q^top: multiply by (1 - q^(n+i)), divide by (1 - q^i).
 // Unsigned arithmetic wraps, and what is left at the end is exact because it is below the modulus.
@@ -149,11 +144,6 @@ std::vector<Count> gaussian_binomial(std::int64_t m, std::int64_t n, std::int64_
         }
     }
     return count;
-}
-
-double gaussian_binomial_seconds(std::int64_t first, std::int64_t second) {
-    const auto m = static_cast<double>(std::min(first, second));
-    return seconds_per_wide_addition * 2 * m * m * static_cast<double>(std::max(first, second)) / 2;
 }
 
 constexpr double most_entries = 2.5e6; // 40 MB of 128-bit counts
@@ -216,22 +206,11 @@ Tails UntiedRankSumLaw::at(std::int64_t k) const {
     const bool above = 2 * k > pairs;
     const std::int64_t low = above ? pairs - k : k;
     Tails tails = cumulative_ ? cumulative_->at(static_cast<std::size_t>(low))
-                              : rank_sum_tails(untied_choice_scores(first_, second_, low));
+                              : exact_rank_sum_tails(untied_choice_scores(first_, second_, low), seconds_for_a_gap);
     if (2 * k == pairs) {
         tails.upper = tails.lower;
     }
     return above ? tails.swapped() : tails;
-}
-
-double UntiedRankSumLaw::cost(std::int64_t first, std::int64_t second, int queries) {
-    if (integers_suffice(first, second)) {
-        return gaussian_binomial_seconds(first, second);
-    }
-    constexpr double too_many = 1e5;
-    if (static_cast<double>(first) + static_cast<double>(second) > too_many) {
-        return std::numeric_limits<double>::infinity();
-    }
-    return queries * rank_sum_cost(untied_choice_scores(first, second, first * second / 2));
 }
 
 } // namespace rankstead

@@ -26,13 +26,22 @@ struct ChoiceScores {
 // 0, 1, ..., first + second - 1, with U of the first sample.
 [[nodiscard]] ChoiceScores untied_choice_scores(std::int64_t first, std::int64_t second, std::int64_t u);
 
+// A law brought to the smaller sample and to the lower half, so that equal questions are one computation and the tail
+// that is summed is the smaller one.
+struct CanonicalChoice {
+    ChoiceScores scores;
+    bool swaps = false;   // whether the tails change places
+    bool centred = false; // symmetric and at its centre: both tails are equal
+};
+[[nodiscard]] CanonicalChoice canonical(const ChoiceScores& scores);
+
 // Predicted seconds for one law; infinity where it would need too much memory or overflow a double.
 [[nodiscard]] double rank_sum_cost(const ChoiceScores& scores);
 
 // Both tails. Swapping the samples swaps the tails exactly.
 [[nodiscard]] Tails rank_sum_tails(const ChoiceScores& scores);
 
-// P(U <= k) for all k up to half the range, without ties: computed once where the integers suffice, else for each k.
+// P(U <= k) for all k up to half the range, without ties: computed once where exact integers suffice, else for each k.
 class UntiedRankSumLaw {
 public:
     UntiedRankSumLaw(std::int64_t first, std::int64_t second);
@@ -40,11 +49,8 @@ public:
     UntiedRankSumLaw(const UntiedRankSumLaw&) = delete;
     UntiedRankSumLaw& operator=(const UntiedRankSumLaw&) = delete;
 
-    // Both tails at U = k, 0 <= k <= first * second.
+    // Both tails at U = k, 0 <= k <= first * second. Throws LawTooLong.
     [[nodiscard]] Tails at(std::int64_t k) const;
-
-    // Predicted seconds for the law and `queries` values of k.
-    [[nodiscard]] static double cost(std::int64_t first, std::int64_t second, int queries);
 
 private:
     class Cumulative;

@@ -1,6 +1,7 @@
 #include "signed_rank_law.h"
 
 #include "compensated_sum.h"
+#include "exact_laws.h"
 
 #include <algorithm>
 #include <cmath>
@@ -130,6 +131,10 @@ UntiedSignedRankLaw::UntiedSignedRankLaw(std::int64_t n) : n_(n), sum_(n * (n + 
         std::partial_sum(counted_.begin(), counted_.end(), counted_.begin());
         return;
     }
+    constexpr double quick_seconds = 0.02;
+    if (signed_rank_cost(untied_sign_scores(n, top)) > quick_seconds) {
+        return;
+    }
     const auto size = static_cast<std::size_t>(n);
     summed_ = distribution<double>(scores.scores, top, std::ldexp(1.0, start_exponent(size)));
     CompensatedSum sum;
@@ -146,6 +151,8 @@ Tails UntiedSignedRankLaw::at(std::int64_t k) const {
     if (!counted_.empty()) {
         const std::uint64_t total = std::uint64_t{1} << n_;
         tails = from_counts({counted_[low], total - (low > 0 ? counted_[low - 1] : 0), total});
+    } else if (summed_.empty()) {
+        return exact_signed_rank_tails(untied_sign_scores(n_, k), seconds_for_a_gap);
     } else {
         tails.lower = summed_[low];
         tails.upper = 1 - (low > 0 ? summed_[low - 1] : 0);

@@ -27,11 +27,11 @@ struct SignScores {
 
 [[nodiscard]] Tails signed_rank_tails(const SignScores& scores);
 
-// P(T <= k) for all k up to half the range, without ties, computed once.
+// P(T <= k) for all k up to half the range, without ties, computed once while that is quick, else for each k.
 class UntiedSignedRankLaw {
 public:
     explicit UntiedSignedRankLaw(std::int64_t n);
-    // Both tails at T = k, 0 <= k <= n(n+1)/2.
+    // Both tails at T = k, 0 <= k <= n(n+1)/2. Throws LawTooLong.
     [[nodiscard]] Tails at(std::int64_t k) const;
 
 private:

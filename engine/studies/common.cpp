@@ -15,6 +15,14 @@ void take_exact(Outcome& outcome, const Tails& tails) {
     }
 }
 
+void take_approximate(Outcome& outcome, const Moments& moments) {
+    outcome.exact = false;
+    outcome.relative_error.reset();
+    outcome.arrangements.clear();
+    outcome.p = normal_p(outcome.statistic, moments, outcome.settings.side);
+    outcome.z = normal_deviate(outcome.statistic, moments, outcome.settings.side);
+}
+
 std::string chosen_name(const std::string& setting, const std::string& heading, const std::string& otherwise) {
     return !setting.empty() ? setting : !heading.empty() ? heading : otherwise;
 }

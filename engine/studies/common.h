@@ -3,6 +3,8 @@
 
 #include "../estimates/limits.h"
 #include "../grid.h"
+#include "../laws/exact_laws.h"
+#include "../laws/normal_approximation.h"
 #include "../laws/tails.h"
 #include "../outcome.h"
 
@@ -13,15 +15,25 @@
 
 namespace rankstead {
 
-// What the exact law of one call may take, p and both limits together, by prediction. Half a second is the ceiling for
-// anything automatic; the margin is for slower machines.
-inline constexpr double exact_budget_seconds = 0.3;
-
-// Laws evaluated for a pair of limits by galloping and bisection, as predicted for the budget.
-inline constexpr int laws_per_interval = 14;
-
 // Fills p, arrangements and accuracy from an exact law.
 void take_exact(Outcome& outcome, const Tails& tails);
+
+// Fills p and z from the normal approximation at outcome.statistic.
+void take_approximate(Outcome& outcome, const Moments& moments);
+
+// Runs `test(exact)`: exact unless the approximation was asked for, approximate if the exact laws would take too long.
+template <class TestRun>
+void exact_or_approximate(Outcome& outcome, TestRun&& test) {
+    if (outcome.settings.method != Method::approximate) {
+        try {
+            test(true);
+            return;
+        } catch (const LawTooLong&) {
+            outcome.observations.exact_wanted_but_too_long = true;
+        }
+    }
+    test(false);
+}
 
 // The name for sentences: the setting, else the heading, else `otherwise`.
 [[nodiscard]] std::string chosen_name(const std::string& setting, const std::string& heading,

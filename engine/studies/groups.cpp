@@ -57,21 +57,19 @@ Moments untied_moments(std::int64_t first, std::int64_t second) {
 template <class Int>
 class RankSumPlan {
 public:
-    RankSumPlan(const Outcome& outcome, const TwoSamples<Int>& samples, const PooledRanking& ranking)
+    RankSumPlan(const Outcome& outcome, const TwoSamples<Int>& samples, const PooledRanking& ranking, bool exact)
         : samples_(samples), first_(ranking.first), second_(ranking.second),
           table_(outcome.settings.interval == IntervalRule::table),
           tied_within_(has_equal_neighbours(samples.first) || has_equal_neighbours(samples.second)),
-          untied_(ranking.tied() == 0) {
-        exact_ = outcome.settings.method != Method::approximate && seconds(ranking) <= exact_budget_seconds;
+          untied_(ranking.tied() == 0), exact_(exact) {
         if (exact_ && (one_law() || untied_)) {
             law_ = std::make_shared<const UntiedRankSumLaw>(first_, second_);
         }
     }
 
-    [[nodiscard]] bool exact() const { return exact_; }
-
     [[nodiscard]] Tails observed(const PooledRanking& ranking) const {
-        return untied_ ? law_->at(ranking.doubled_u() / 2) : rank_sum_tails(choice_scores(ranking));
+        return untied_ ? law_->at(ranking.doubled_u() / 2)
+                       : exact_rank_sum_tails(choice_scores(ranking), seconds_for_p);
     }
 
     [[nodiscard]] Inversion<Int> inversion() const {
@@ -85,18 +83,6 @@ public:
 
 private:
     [[nodiscard]] bool one_law() const { return table_ || !tied_within_; }
-
-    [[nodiscard]] double seconds(const PooledRanking& ranking) const {
-        double sum = 0;
-        if (one_law() || untied_) {
-            sum += UntiedRankSumLaw::cost(first_, second_, laws_per_interval);
-        }
-        if (!untied_) {
-            const double one = rank_sum_cost(choice_scores(ranking));
-            sum += one_law() ? one : laws_per_interval * one;
-        }
-        return sum;
-    }
 
     [[nodiscard]] GapTails gap_tails(const std::vector<Int>& x, const std::vector<Int>& y) const {
         const std::int64_t pairs = first_ * second_;
@@ -112,8 +98,9 @@ private:
         return [sums = std::make_shared<const OrderedSums<Int>>(OrderedSums<Int>::differences(x, y)),
                 twice_x = times(x, 2), twice_y = times(y, 2)](std::int64_t k) {
             const GapPlace<Int> gap = gap_above(*sums, k);
-            return Gap{rank_sum_tails(choice_scores(rank_pooled(twice_x, twice_y, gap.twice_middle))), gap.first,
-                       gap.last};
+            return Gap{
+                exact_rank_sum_tails(choice_scores(rank_pooled(twice_x, twice_y, gap.twice_middle)), seconds_for_a_gap),
+                gap.first, gap.last};
         };
     }
 
@@ -123,29 +110,30 @@ private:
     bool table_;
     bool tied_within_;
     bool untied_;
-    bool exact_ = false;
+    bool exact_;
     std::shared_ptr<const UntiedRankSumLaw> law_;
 };
 
 template <class Int>
-void rank_sum_test(Outcome& outcome, const TwoSamples<Int>& samples) {
-    const PooledRanking ranking = rank_pooled(samples.first, samples.second, samples.margin);
-    const RankSumPlan<Int> plan(outcome, samples, ranking);
-    outcome.statistic = static_cast<double>(ranking.doubled_u()) / 2;
-    outcome.tied = static_cast<std::size_t>(ranking.tied());
-    outcome.smallest_p = smallest_two_sided_p(ranking);
-    if (plan.exact()) {
+void rank_sum_test(Outcome& outcome, const TwoSamples<Int>& samples, const PooledRanking& ranking, bool exact) {
+    const RankSumPlan<Int> plan(outcome, samples, ranking, exact);
+    if (exact) {
         take_exact(outcome, plan.observed(ranking));
     } else {
-        const Moments moments = rank_sum_moments(ranking);
-        outcome.exact = false;
-        outcome.p = normal_p(outcome.statistic, moments, outcome.settings.side);
-        outcome.z = normal_deviate(outcome.statistic, moments, outcome.settings.side);
-        outcome.observations.exact_wanted_but_too_long = outcome.settings.method != Method::approximate;
+        take_approximate(outcome, rank_sum_moments(ranking));
     }
     const Inversion<Int> inversion = plan.inversion();
     outcome.estimate = median_breakpoint(inversion.breakpoints, 0, samples.grid);
     take_limits(outcome, inversion, samples.grid);
+}
+
+template <class Int>
+void rank_sum_study(Outcome& outcome, const TwoSamples<Int>& samples) {
+    const PooledRanking ranking = rank_pooled(samples.first, samples.second, samples.margin);
+    outcome.statistic = static_cast<double>(ranking.doubled_u()) / 2;
+    outcome.tied = static_cast<std::size_t>(ranking.tied());
+    outcome.smallest_p = smallest_two_sided_p(ranking);
+    exact_or_approximate(outcome, [&](bool exact) { rank_sum_test(outcome, samples, ranking, exact); });
 }
 
 template <class Int>
@@ -192,7 +180,7 @@ Outcome run_groups(const Arguments& arguments, const Settings& settings) {
                          describe(samples.first, grid)};
         outcome.second = {chosen_name(settings.second_name, second.heading, "second"), second.values.size(),
                           describe(samples.second, grid)};
-        rank_sum_test(outcome, samples);
+        rank_sum_study(outcome, samples);
         take_superiority(outcome, samples);
     });
     outcome.observations.spreads_differ = spreads_differ(outcome.first, *outcome.second);

@@ -1,5 +1,6 @@
 #include "one_sample.h"
 
+#include "../laws/exact_laws.h"
 #include "../laws/normal_approximation.h"
 #include "../laws/sign_law.h"
 #include "../laws/signed_rank_law.h"
@@ -32,9 +33,7 @@ void sign_test(Outcome& outcome, const OneSample<Int>& sample, const SignedRanki
     const auto all = static_cast<std::int64_t>(sample.sorted.size());
     GapTails in_gap = one_law_gaps(all, [all](std::int64_t above_gap) { return sign_tails(all, above_gap); });
     if (outcome.settings.method == Method::approximate) {
-        outcome.exact = false;
-        outcome.p = normal_p(outcome.statistic, moments, outcome.settings.side);
-        outcome.z = normal_deviate(outcome.statistic, moments, outcome.settings.side);
+        take_approximate(outcome, moments);
         in_gap = normal_gaps(all, sign_moments(all));
     } else {
         take_exact(outcome, sign_tails(ranking.used, above));
@@ -64,17 +63,15 @@ Moments untied_moments(std::int64_t n) {
 template <class Int>
 class SignedRankPlan {
 public:
-    SignedRankPlan(const Outcome& outcome, const OneSample<Int>& sample, const SignedRanking& ranking)
+    SignedRankPlan(const Outcome& outcome, const OneSample<Int>& sample, const SignedRanking& ranking, bool exact)
         : sorted_(sample.sorted), n_(static_cast<std::int64_t>(sample.sorted.size())), walsh_(n_ * (n_ + 1) / 2),
           scores_(sign_scores(ranking)), table_(outcome.settings.interval == IntervalRule::table),
-          tied_values_(has_equal_neighbours(sorted_)) {
-        exact_ = outcome.settings.method != Method::approximate && seconds() <= exact_budget_seconds;
+          tied_values_(has_equal_neighbours(sorted_)), exact_(exact) {
         if (exact_ && one_law()) {
             law_ = std::make_shared<const UntiedSignedRankLaw>(n_);
         }
     }
 
-    [[nodiscard]] bool exact() const { return exact_; }
     [[nodiscard]] const SignScores& scores() const { return scores_; }
 
     [[nodiscard]] Inversion<Int> inversion() const {
@@ -91,12 +88,6 @@ private:
     // Without equal values, and in the classical table, the law is the untied one in every gap.
     [[nodiscard]] bool one_law() const { return table_ || !tied_values_; }
 
-    [[nodiscard]] double seconds() const {
-        const SignScores widest = untied_sign_scores(n_, walsh_ / 2);
-        const double one = signed_rank_cost(widest);
-        return signed_rank_cost(scores_) + (one_law() ? one : laws_per_interval * one);
-    }
-
     [[nodiscard]] GapTails gap_tails(const std::vector<Int>& sorted) const {
         if (!exact_) {
             return normal_gaps(walsh_, table_ ? untied_moments(n_) : gap_moments(sorted));
@@ -108,8 +99,9 @@ private:
         return [sums = std::make_shared<const OrderedSums<Int>>(OrderedSums<Int>::walsh(sorted)),
                 fourfold = times(sorted, 4)](std::int64_t k) {
             const GapPlace<Int> gap = gap_above(*sums, k);
-            return Gap{signed_rank_tails(sign_scores(rank_signed(fourfold, gap.twice_middle, false))), gap.first,
-                       gap.last};
+            return Gap{
+                exact_signed_rank_tails(sign_scores(rank_signed(fourfold, gap.twice_middle, false)), seconds_for_a_gap),
+                gap.first, gap.last};
         };
     }
 
@@ -119,7 +111,7 @@ private:
     SignScores scores_;
     bool table_;
     bool tied_values_;
-    bool exact_ = false;
+    bool exact_;
     std::shared_ptr<const UntiedSignedRankLaw> law_;
 };
 
@@ -128,7 +120,7 @@ template <class Int>
 double dropped_p(const OneSample<Int>& sample, const Int& margin, Side side, bool exact) {
     const SignedRanking ranking = rank_signed(sample.sorted, margin, false);
     if (exact) {
-        return p_value(signed_rank_tails(sign_scores(ranking)), side);
+        return p_value(exact_signed_rank_tails(sign_scores(ranking), seconds_for_a_gap), side);
     }
     return normal_p(static_cast<double>(ranking.doubled_positive_sum) / 2, signed_rank_moments(ranking), side);
 }
@@ -181,24 +173,20 @@ std::vector<double> exceptional_margins(const Outcome& outcome, const OneSample<
 }
 
 template <class Int>
-void signed_rank_test(Outcome& outcome, const OneSample<Int>& sample, const SignedRanking& ranking) {
+void signed_rank_test(Outcome& outcome, const OneSample<Int>& sample, const SignedRanking& ranking, bool exact) {
     const Settings& settings = outcome.settings;
-    const SignedRankPlan<Int> plan(outcome, sample, ranking);
+    const SignedRankPlan<Int> plan(outcome, sample, ranking, exact);
     outcome.statistic = static_cast<double>(ranking.doubled_positive_sum) / 2;
-    if (plan.exact()) {
-        take_exact(outcome, signed_rank_tails(plan.scores()));
+    if (exact) {
+        take_exact(outcome, exact_signed_rank_tails(plan.scores(), seconds_for_p));
     } else {
-        const Moments moments = signed_rank_moments(ranking);
-        outcome.exact = false;
-        outcome.p = normal_p(outcome.statistic, moments, settings.side);
-        outcome.z = normal_deviate(outcome.statistic, moments, settings.side);
-        outcome.observations.exact_wanted_but_too_long = settings.method != Method::approximate;
+        take_approximate(outcome, signed_rank_moments(ranking));
     }
     const Inversion<Int> inversion = plan.inversion();
     outcome.estimate = median_breakpoint(inversion.breakpoints, 1, sample.grid);
     take_limits(outcome, inversion, sample.grid);
     if (settings.zeros == Zeros::drop && settings.interval == IntervalRule::matching) {
-        outcome.observations.exceptional_margins = exceptional_margins(outcome, sample, plan.exact());
+        outcome.observations.exceptional_margins = exceptional_margins(outcome, sample, exact);
     }
 }
 
@@ -240,7 +228,7 @@ void analyse_one_sample(Outcome& outcome, const OneSample<Int>& sample) {
     if (sign) {
         sign_test(outcome, sample, ranking);
     } else {
-        signed_rank_test(outcome, sample, ranking);
+        exact_or_approximate(outcome, [&](bool exact) { signed_rank_test(outcome, sample, ranking, exact); });
         outcome.observations.lopsided = is_lopsided(sample);
     }
     take_chance_of_rise(outcome, sample);
