@@ -18,6 +18,12 @@ constexpr std::size_t most_memo_cells = 400'000;
     throw Refusal(Status::bad_call, std::move(reason));
 }
 
+void require_utf8(std::string_view text, const char* what) {
+    if (!is_utf8(text)) {
+        refuse_call(std::string(what) + " is not valid UTF-8.");
+    }
+}
+
 void check_size(std::string_view argument, const Borrowed& data) {
     if (data.columns != 0 && data.rows > std::numeric_limits<std::size_t>::max() / sizeof(rks_cell) / data.columns) {
         refuse_call(std::string(argument) + ": rows times columns is more than memory can hold.");
@@ -29,6 +35,9 @@ void check_size(std::string_view argument, const Borrowed& data) {
 
 Cell converted(const rks_cell& cell, const Place& place) {
     const auto refuse = [&](const char* why) { throw Refusal(Status::bad_call, why, place); };
+    if (cell.reserved != 0) {
+        refuse("the cell's member `reserved` must be 0.");
+    }
     switch (cell.kind) {
     case RKS_CELL_BLANK:
         return {};
@@ -147,7 +156,11 @@ void lend(rks_inquiry& inquiry, std::string_view argument, const Borrowed& data)
     check_size(word, data);
     if (word == "settings") {
         Settings changed = inquiry.settings;
-        apply_settings_block(changed, *inquiry.study, block_of("settings", data));
+        const Block block = block_of("settings", data);
+        for (const Cell& cell : block.cells) {
+            require_utf8(cell.text, "a cell of the settings");
+        }
+        apply_settings_block(changed, *inquiry.study, block);
         inquiry.settings = std::move(changed);
         discard(inquiry);
         return;
@@ -169,9 +182,8 @@ void lend(rks_inquiry& inquiry, std::string_view argument, const Borrowed& data)
 }
 
 void set_setting(rks_inquiry& inquiry, std::string_view setting, std::string_view value) {
-    if (!is_utf8(setting) || !is_utf8(value)) {
-        refuse_call("the name or the value of the setting is not valid UTF-8.");
-    }
+    require_utf8(setting, "the name of the setting");
+    require_utf8(value, "the value of the setting");
     apply_setting(inquiry.settings, *inquiry.study, setting, value);
     discard(inquiry);
 }
@@ -193,6 +205,7 @@ void run(rks_inquiry& inquiry) {
 }
 
 const AnswerRow& answer_asked(const rks_inquiry& inquiry, std::string_view answer) {
+    require_utf8(answer, "the answer's name");
     const AnswerRow& row = answer_of(*inquiry.study, answer);
     if (!inquiry.outcome && !inquiry.failure) {
         throw Refusal(Status::not_run, "the inquiry has not been run since its data or settings changed.");
@@ -207,7 +220,9 @@ Reading read_answer(const rks_inquiry& inquiry, const AnswerRow& answer) {
 rks_inquiry::HandedOut& place_for(const rks_inquiry& inquiry, const AnswerRow& answer) {
     inquiry.handed_out.resize(answers().size());
     auto& place = inquiry.handed_out[static_cast<std::size_t>(&answer - answers().data())];
-    place = std::make_unique<rks_inquiry::HandedOut>();
+    if (!place) {
+        place = std::make_unique<rks_inquiry::HandedOut>();
+    }
     return *place;
 }
 

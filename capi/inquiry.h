@@ -43,7 +43,7 @@ struct rks_inquiry {
     // Texts and tables handed out, by answer, kept until the next run. Reading an answer does not change the inquiry,
     // but it has to put the text somewhere.
     struct HandedOut {
-        std::string text;
+        std::optional<std::string> text; // once handed out, never touched
         std::vector<std::string> texts;
         std::vector<rks_cell> cells;
     };
@@ -62,7 +62,7 @@ void run(rks_inquiry& inquiry);
 [[nodiscard]] const AnswerRow& answer_asked(const rks_inquiry& inquiry, std::string_view answer);
 [[nodiscard]] Reading read_answer(const rks_inquiry& inquiry, const AnswerRow& answer);
 
-// The place for what an answer hands out.
+// The place for what an answer hands out; the same until the next run.
 [[nodiscard]] rks_inquiry::HandedOut& place_for(const rks_inquiry& inquiry, const AnswerRow& answer);
 
 } // namespace rankstead

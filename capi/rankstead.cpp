@@ -125,6 +125,9 @@ rks_status rks_inquiry_new(const char* study, rks_inquiry** out) {
     }
     return guarded(
         [&] {
+            if (!is_utf8(study)) {
+                return Status::bad_call;
+            }
             const StudyRow* row = find_study(study);
             if (row == nullptr) {
                 return Status::unknown_study;
@@ -213,10 +216,12 @@ rks_status rks_inquiry_text(const rks_inquiry* inquiry, const char* answer, cons
         }
         const auto [status, table] = table_of(*inquiry, row);
         rks_inquiry::HandedOut& place = place_for(*inquiry, row);
-        place.text = reading_text(table.cells.front());
-        *out = place.text.c_str();
+        if (!place.text) {
+            place.text = reading_text(table.cells.front());
+        }
+        *out = place.text->c_str();
         if (length != nullptr) {
-            *length = place.text.size();
+            *length = place.text->size();
         }
         return status;
     });
@@ -232,9 +237,11 @@ rks_status rks_inquiry_table(const rks_inquiry* inquiry, const char* answer, con
         const AnswerRow& row = answer_asked(*inquiry, text_or_empty(answer));
         const auto [status, table] = table_of(*inquiry, row);
         rks_inquiry::HandedOut& place = place_for(*inquiry, row);
-        place.texts.reserve(table.cells.size());
-        for (const Reading& reading : table.cells) {
-            place.cells.push_back(cell_of(reading, place.texts));
+        if (place.cells.empty()) {
+            place.texts.reserve(table.cells.size());
+            for (const Reading& reading : table.cells) {
+                place.cells.push_back(cell_of(reading, place.texts));
+            }
         }
         *cells = place.cells.data();
         *columns = table.columns;

@@ -81,6 +81,11 @@ inline Reading read_notes(const Outcome& outcome) {
     return reading(text);
 }
 
+inline Reading read_check(const Outcome& outcome) {
+    const std::string& reason = outcome.observations.interval_reason;
+    return reason.empty() ? std::string("ok") : "ok, but without limits: " + reason;
+}
+
 inline Reading read_stamp(const Outcome& outcome) {
     const StudyRow& study = study_of(outcome);
     return "Rankstead " + std::string(version) + "; " + study.word + "; " + settings_in_force(outcome.settings, study) +
@@ -170,7 +175,7 @@ inline constexpr std::array answer_table{
               "Where every cell went: seen = used + blank + text + censored + unpaired.", every_data_study,
               [](const Outcome& o) -> Reading { return ledger_words(o); }},
     AnswerRow{"check", "", AnswerKind::text, "ok, or in plain words why nothing could be computed.", every_data_study,
-              [](const Outcome&) -> Reading { return std::string("ok"); }},
+              read_check},
     AnswerRow{"methods", "", AnswerKind::text, "One sentence for a methods section, with the version.",
               every_data_study, [](const Outcome& o) -> Reading { return methods_sentence(o); }},
     AnswerRow{"stamp", "", AnswerKind::text,

@@ -54,7 +54,9 @@ bool has_letter(std::string_view text) {
 
 class SlotReader {
 public:
-    SlotReader(const Block& block, const Settings& settings) : block_(block), settings_(settings) {
+    // `selected` counts the cells of the whole selection: a heading above nothing but blanks is still one.
+    SlotReader(const Block& block, const Settings& settings, std::size_t selected)
+        : block_(block), settings_(settings), selected_(selected) {
         for (const std::string& word : settings.missing) {
             missing_.push_back(folded(word));
         }
@@ -115,7 +117,7 @@ private:
     }
 
     bool is_heading(std::string_view text, std::size_t index) const {
-        return index == 0 && block_.cells.size() > 1 && has_letter(text) && !is_beyond_limit(text) &&
+        return index == 0 && selected_ > 1 && has_letter(text) && !is_beyond_limit(text) &&
                !is_number_in_some_way(text) && !is_known_missing_word(text);
     }
 
@@ -139,12 +141,13 @@ private:
 
     const Block& block_;
     const Settings& settings_;
+    std::size_t selected_;
     std::vector<std::string> missing_;
     Slots slots_;
 };
 
-Slots read_slots(const Block& block, const Settings& settings) {
-    return SlotReader(block, settings).read();
+Slots read_slots(const Block& block, const Settings& settings, std::size_t selected) {
+    return SlotReader(block, settings, selected).read();
 }
 
 Column column_of(Slots&& slots) {
@@ -159,9 +162,9 @@ Column column_of(Slots&& slots) {
     return column;
 }
 
-[[noreturn]] void refuse_empty(const Ledger& ledger) {
-    throw Refusal(Status::no_data, ledger.argument + ": there is not one value among its " +
-                                       std::to_string(ledger.seen) + " cells. Select cells that hold numbers.");
+[[noreturn]] void refuse_empty(const Block& block) {
+    throw Refusal(Status::no_data, block.argument + ": there is not one value among its " +
+                                       std::to_string(block.cells.size()) + " cells. Select cells that hold numbers.");
 }
 
 // A selection often reaches beyond the data; what is blank below the last filled cell is not a missing value.
@@ -219,9 +222,9 @@ std::size_t count_equal_decimals(const Block& first, const Block& second) {
 Column read_column(const Block& block, const Settings& settings) {
     Block filled = block;
     drop_blanks_at_the_end(filled);
-    Column column = column_of(read_slots(filled, settings));
+    Column column = column_of(read_slots(filled, settings, block.cells.size()));
     if (column.values.empty()) {
-        refuse_empty(column.ledger);
+        refuse_empty(block);
     }
     return column;
 }
@@ -233,8 +236,8 @@ PairedColumns read_pairs(const Block& first, const Block& second, const Settings
                                                    std::to_string(second.cells.size()) +
                                                    ". Pairs are read row by row: select the same rows in both.");
     }
-    Slots a = read_slots(first, settings);
-    Slots b = read_slots(second, settings);
+    Slots a = read_slots(first, settings, first.cells.size());
+    Slots b = read_slots(second, settings, second.cells.size());
     if (!a.values.empty()) {
         check_headings(a, b, second, first);
     }

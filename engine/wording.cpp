@@ -13,7 +13,9 @@ namespace rankstead {
 
 namespace {
 
+// Halves are rounded away from zero, as people do: a tie is a double just short of the next one.
 std::string fixed_text(double value, int decimals) {
+    value = value == 0 ? 0 : std::nextafter(value, std::copysign(HUGE_VAL, value));
     std::array<char, 400> buffer{};
     const auto end =
         std::to_chars(buffer.data(), buffer.data() + buffer.size(), value, std::chars_format::fixed, decimals);

@@ -120,10 +120,12 @@ Interval newcombe_interval(const PooledRanking& ranking, double rate) {
 Interval clopper_pearson_interval(double successes, double n, double rate) {
     Interval interval;
     if (successes > 0) {
-        interval.lower = bisected([&](double p) { return boost::math::ibeta(successes, n - successes + 1, p) >= rate; });
+        interval.lower =
+            bisected([&](double p) { return boost::math::ibeta(successes, n - successes + 1, p) >= rate; });
     }
     if (successes < n) {
-        interval.upper = bisected([&](double p) { return boost::math::ibetac(successes + 1, n - successes, p) <= rate; });
+        interval.upper =
+            bisected([&](double p) { return boost::math::ibetac(successes + 1, n - successes, p) <= rate; });
     }
     return interval;
 }

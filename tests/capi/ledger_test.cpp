@@ -49,7 +49,7 @@ void expect_balanced(Account account, long seen) {
 TEST(Ledger, counts_a_heading_a_missing_word_and_blanks) {
     Inquiry inquiry("groups");
     inquiry.cells("first", {text_cell("Ward"), number_cell(3), blank_cell(), text_cell("n/a"), number_cell(5)});
-    inquiry.cells("second", {number_cell(1), blank_cell(), blank_cell()});
+    inquiry.cells("second", {blank_cell(), blank_cell(), number_cell(1)});
     inquiry.set("missing", "n/a");
     ASSERT_EQ(inquiry.run(), RKS_OK) << inquiry.message();
     auto accounts = read_ledger(inquiry.text("ledger"));

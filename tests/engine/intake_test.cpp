@@ -51,9 +51,16 @@ TEST(ReadColumn, takes_numbers_in_the_order_of_the_cells) {
 }
 
 TEST(ReadColumn, never_takes_a_blank_for_a_zero) {
-    const Column read = read_column(cells("values", {blank(), number(0), text(""), text(" \xC2\xA0")}), {});
+    const Column read = read_column(cells("values", {blank(), text(""), text(" \xC2\xA0"), number(0)}), {});
     EXPECT_EQ(read.values, (std::vector<Decimal>{{}}));
     EXPECT_EQ(read.ledger.blank, 3U);
+    expect_balanced(read.ledger);
+}
+
+TEST(ReadColumn, does_not_count_blanks_after_the_last_filled_cell) {
+    const Column read = read_column(cells("values", {number(1), blank(), number(2), blank(), text(" "), blank()}), {});
+    EXPECT_EQ(read.ledger.seen, 3U);
+    EXPECT_EQ(read.ledger.blank, 1U);
     expect_balanced(read.ledger);
 }
 
@@ -136,7 +143,12 @@ TEST(ReadColumn, refuses_a_range_without_one_value) {
     const Refusal refusal = column_refusal({blank(), blank()});
     EXPECT_EQ(refusal.status(), Status::no_data);
     EXPECT_TRUE(mentions(refusal, "not one value among its 2 cells"));
-    EXPECT_EQ(column_refusal({text("Heading"), blank()}).status(), Status::no_data);
+}
+
+TEST(ReadColumn, refuses_a_heading_above_nothing_but_blanks_for_want_of_values) {
+    const Refusal refusal = column_refusal({text("Heading"), blank(), blank()});
+    EXPECT_EQ(refusal.status(), Status::no_data);
+    EXPECT_TRUE(mentions(refusal, "not one value among its 3 cells"));
 }
 
 TEST(ReadColumn, quotes_no_more_than_the_beginning_of_a_long_text) {

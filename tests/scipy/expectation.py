@@ -90,9 +90,12 @@ class Expectation:
 
     def counts(self):
         """n, missing and, for one sample, zeros."""
-        arguments = [values for name, values in self.case.data.items() if name != "reference"]
-        counts = {"n": len(self.first) + len(self.second) if self.is_groups else len(self.differences),
-                  "missing": sum(v is None for values in arguments for v in values)}
+        arguments = [_up_to_the_last_value(v) for name, v in self.case.data.items() if name != "reference"]
+        if self.case.study == "pairs":
+            arguments = list(self.case.data.values())
+        counts = {"n": len(self.first) + len(self.second) if self.is_groups else len(self.differences)}
+        if any(values[-1] is not None for values in arguments):  # a last pair of blanks may be no pair at all
+            counts["missing"] = sum(v is None for values in arguments for v in values)
         if not self.is_groups:
             counts["zeros"] = self.shifted().count(0)
         return counts
@@ -110,3 +113,9 @@ class Expectation:
     def quartiles(self, name):
         values = self.first if name == "first" else self.second
         return [describe.quartile(values, q) for q in (1, 2, 3)]
+
+
+def _up_to_the_last_value(values):
+    """Blanks after the last value are no cells of the data: a reference to a whole column ends in a million of them."""
+    last = max(position for position, value in enumerate(values) if value is not None)
+    return values[:last + 1]

@@ -404,16 +404,22 @@ private:
     Complex product_row(std::int64_t j) {
         fill_factors(j);
         const Complex phase = std::conj(exact_unit(j, w_, sum_points_));
+        // The scores are taken as they are, but s belongs to scores about their mean: turned back by t times the mean.
+        const std::int64_t fine = law_.items().size() * sum_points_;
+        const Wide mean = law_.items().sum();
+        const Complex back = fixed_ ? std::conj(exact_unit(j, mean, fine)) : Complex(1, 0);
+        const Complex count_back = fixed_ ? exact_unit(j, mean * chosen_, fine) : Complex(1, 0);
         Complex sum = 0;
         row_rounding_ = 0;
         for (const std::int64_t k : points_) {
-            const Complex turn = fixed_ ? exact_unit(k, 1, count_points_) : Complex(1, 0);
-            const Complex count_phase = fixed_ ? std::conj(exact_unit(k, chosen_, count_points_)) : Complex(1, 0);
+            const Complex turn = fixed_ ? exact_unit(k, 1, count_points_) * back : Complex(1, 0);
+            const Complex count_phase =
+                fixed_ ? std::conj(exact_unit(k, chosen_, count_points_)) * count_back : Complex(1, 0);
             double smallest = 1;
             const Complex product = multiplied(turn, smallest);
             sum += product * phase * count_phase;
             row_rounding_ +=
-                std::abs(product) * (law_.size() * (16 / std::sqrt(smallest) + 3) + 24) * unit_roundoff * slack;
+                std::abs(product) * (law_.size() * (20 / std::sqrt(smallest) + 3) + 40) * unit_roundoff * slack;
         }
         return sum;
     }

@@ -6,7 +6,7 @@
 // Rounding. u is half the machine epsilon. In the series a term of degree k passes through at most 8k + 64 roundings of
 // its own size (offsets and their powers 4l, complex powers 3l, Horner 4j, binomial k, blocks of 32 and the rest 64),
 // so its error is at most (8k + 64) u times the sum of the absolute terms (Higham 2002, section 3.1). In a product a
-// factor q + p e^y is off by at most 16u absolutely, 16u/|factor| relatively, and each complex multiplication by 3u
+// factor q + p e^y is off by at most 20u absolutely, 20u/|factor| relatively, and each complex multiplication by 3u
 // more (Brent, Percival & Zimmermann 2007: sqrt(5) u).
 #pragma once
 

@@ -103,8 +103,6 @@ TEST(UntiedRankSumLaw, swapping_the_samples_swaps_the_tails_bit_for_bit) {
 TEST(RankSumCost, grows_with_the_samples_until_the_doubles_cannot_hold_the_law) {
     EXPECT_LT(rank_sum_cost(untied_choice_scores(10, 10, 50)), rank_sum_cost(untied_choice_scores(50, 50, 1250)));
     EXPECT_TRUE(std::isinf(rank_sum_cost(untied_choice_scores(600, 600, 180000))));
-    EXPECT_TRUE(std::isinf(UntiedRankSumLaw::cost(100000, 100000, 1)));
-    EXPECT_LT(UntiedRankSumLaw::cost(50, 50, 14), 0.01);
 }
 
 // Wilcoxon (1945), two fly sprays, 8 and 8: rank totals 91 and 45. Exact conditional p by enumeration of C(16, 8).

@@ -1,0 +1,54 @@
+// laws/exact_laws.h: which way is taken, and that both ways agree.
+#include "laws/exact_laws.h"
+
+#include "big_laws.h"
+#include "data.h"
+
+#include <gtest/gtest.h>
+
+namespace rankstead {
+namespace {
+
+TEST(ExactSignedRank, agrees_with_the_dynamic_programme_where_both_serve) {
+    for (const std::int64_t statistic : {400000, 350000, 460000}) {
+        const SignScores scores = untied_sign_scores(1300, statistic);
+        const Tails quick = exact_signed_rank_tails(scores, 1);
+        const Tails slow = signed_rank_tails(scores);
+        EXPECT_NEAR(quick.lower / slow.lower, 1, quick.relative_error + slow.relative_error + 1e-15) << statistic;
+        EXPECT_NEAR(quick.upper / slow.upper, 1, 1e-11) << statistic;
+    }
+}
+
+TEST(ExactSignedRank, mirrors_the_tails_exactly) {
+    const std::int64_t n = 3000;
+    const std::int64_t sum = n * (n + 1) / 2;
+    const Tails one = exact_signed_rank_tails(untied_sign_scores(n, 2100000), 1);
+    const Tails other = exact_signed_rank_tails(untied_sign_scores(n, sum - 2100000), 1);
+    EXPECT_EQ(one.lower, other.upper);
+    EXPECT_EQ(one.upper, other.lower);
+}
+
+TEST(ExactRankSum, agrees_with_the_dynamic_programme_where_both_serve) {
+    for (const std::int64_t u : {8000, 10000, 11500, 14000}) {
+        const ChoiceScores scores = untied_choice_scores(150, 150, u);
+        const Tails quick = exact_rank_sum_tails(scores, 1);
+        const Tails slow = rank_sum_tails(scores);
+        EXPECT_NEAR(quick.lower / slow.lower, 1, 1e-11) << u;
+        EXPECT_NEAR(quick.upper / slow.upper, 1, 1e-11) << u;
+    }
+}
+
+TEST(ExactRankSum, swapping_the_samples_swaps_the_tails_exactly) {
+    const Tails one = exact_rank_sum_tails(untied_choice_scores(700, 900, 300000), 1);
+    const Tails other = exact_rank_sum_tails(untied_choice_scores(900, 700, 700 * 900 - 300000), 1);
+    EXPECT_EQ(one.lower, other.upper);
+    EXPECT_EQ(one.upper, other.lower);
+}
+
+TEST(ExactLaws, give_up_where_the_time_allowed_is_too_short) {
+    EXPECT_THROW(static_cast<void>(exact_signed_rank_tails(untied_sign_scores(3000, 2100000), 1e-9)), LawTooLong);
+    EXPECT_THROW(static_cast<void>(exact_rank_sum_tails(untied_choice_scores(700, 900, 300000), 1e-9)), LawTooLong);
+}
+
+} // namespace
+} // namespace rankstead
