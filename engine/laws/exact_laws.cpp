@@ -1,8 +1,11 @@
 #include "exact_laws.h"
 
+#include "binomial_coefficient.h"
 #include "inversion/certified_inversion.h"
 
 #include <algorithm>
+#include <cmath>
+#include <numeric>
 
 namespace rankstead {
 
@@ -25,6 +28,22 @@ Tails tails_of(const CertifiedTail& tail) {
 std::optional<Tails> by_inversion(const CertifiedInversion& inversion, std::int64_t statistic, double seconds) {
     const auto tail = inversion.at(statistic, seconds);
     return tail ? std::optional(tails_of(*tail)) : std::nullopt;
+}
+
+// The lowest sum there is: the ways to fill the last tie group that is not taken whole, out of all choices.
+std::optional<Tails> lowest_sum_tails(const ChoiceScores& law) {
+    const auto m = static_cast<std::size_t>(law.chosen);
+    if (law.statistic != std::accumulate(law.scores.begin(), law.scores.begin() + law.chosen, std::int64_t{0})) {
+        return std::nullopt;
+    }
+    const auto [begin, end] = std::equal_range(law.scores.begin(), law.scores.end(), law.scores[m - 1]);
+    const std::int64_t wanted = law.scores.begin() + law.chosen - begin;
+    const auto n = static_cast<std::int64_t>(law.scores.size());
+    Tails tails;
+    tails.lower = std::exp2(log2_choose(end - begin, wanted) - log2_choose(n, law.chosen));
+    // log n! is right to a few units in the last place of n log n.
+    tails.relative_error = 16 * unit_roundoff * static_cast<double>(n) * (std::log(static_cast<double>(n)) + 1);
+    return tails.relative_error <= 1e-10 ? std::optional(tails) : std::nullopt;
 }
 
 bool setup_fits(const ScoredItems& items, double seconds) {
@@ -71,10 +90,13 @@ Tails exact_rank_sum_tails(const ChoiceScores& scores, double seconds) {
             return law.swaps ? tails->swapped() : *tails;
         }
     }
-    if (by_programme > seconds) {
-        throw LawTooLong();
+    if (by_programme <= seconds) {
+        return rank_sum_tails(scores);
     }
-    return rank_sum_tails(scores);
+    if (const auto tails = lowest_sum_tails(law.scores)) {
+        return law.swaps ? tails->swapped() : *tails;
+    }
+    throw LawTooLong();
 }
 
 } // namespace rankstead

@@ -69,6 +69,13 @@ struct Tilt {
     double sum_variance = 0; // given the count, if that is fixed
 };
 
+// Finite, and with enough spread left that the law is not all but a single point.
+bool is_sound(const Tilt& tilt, bool fixed_count) {
+    constexpr double least_spread = 0.05;
+    return std::isfinite(tilt.a) && std::isfinite(tilt.lambda) && std::isfinite(tilt.jet.value) &&
+           tilt.sum_variance > least_spread && (!fixed_count || tilt.count_variance > least_spread);
+}
+
 // One inversion at one w.
 class Contour {
 public:
@@ -81,7 +88,13 @@ public:
             return std::nullopt;
         }
         find_tilt(spread);
+        if (!is_sound(tilt_, fixed_)) {
+            return std::nullopt; // at the very end of the range the saddlepoint runs away
+        }
         choose_lattice();
+        if (!(alias_bound_ <= expected_value())) {
+            return std::nullopt;
+        }
         const auto ranges = frequencies_that_matter(law_.items().scores, weights(), need_);
         if (!ranges) {
             return std::nullopt;
@@ -214,7 +227,7 @@ private:
                 return points;
             }
             bound = aliases(points);
-            if (bound <= target) {
+            if (bound <= target || !std::isfinite(bound)) {
                 return points;
             }
             points = std::ceil(points * 1.07) + 1;
@@ -309,9 +322,11 @@ private:
             look.transform += sum;
         }
         const double allowance = need_ + 1e-9 * total_weight_;
-        const double whole_step = (total_weight_ - std::abs(look.transform) - allowance) / whole_slope_;
-        const double block_step = block_slope_ > 0 ? (block_decay - allowance) / block_slope_ : 0;
-        look.proven_step = std::max({0.0, whole_step, block_step});
+        const auto step = [&](double decay, double slope) {
+            return slope > 0 && decay > allowance ? (decay - allowance) / slope : 0.0;
+        };
+        look.proven_step =
+            std::max(step(total_weight_ - std::abs(look.transform), whole_slope_), step(block_decay, block_slope_));
         return look;
     }
 

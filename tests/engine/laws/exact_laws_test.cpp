@@ -6,6 +6,8 @@
 
 #include <gtest/gtest.h>
 
+#include <cmath>
+
 namespace rankstead {
 namespace {
 
@@ -43,6 +45,22 @@ TEST(ExactRankSum, swapping_the_samples_swaps_the_tails_exactly) {
     const Tails other = exact_rank_sum_tails(untied_choice_scores(900, 700, 700 * 900 - 300000), 1);
     EXPECT_EQ(one.lower, other.upper);
     EXPECT_EQ(one.upper, other.lower);
+}
+
+// At the end of the range there is no saddlepoint: one arrangement of 2^n, or of C(m + n, m).
+TEST(ExactLaws, reach_the_end_of_the_range) {
+    EXPECT_DOUBLE_EQ(exact_signed_rank_tails(untied_sign_scores(900, 0), 1).lower, std::ldexp(1.0, -900));
+    const Tails separated = exact_rank_sum_tails(untied_choice_scores(400, 400, 0), 1);
+    EXPECT_LE(test::relative_error(separated.lower, 1, test::big_choose(800, 400)), separated.relative_error);
+    EXPECT_LE(separated.relative_error, 1e-10);
+}
+
+TEST(ExactLaws, near_the_end_of_the_range_are_right_or_give_up) {
+    for (const std::int64_t u : {1, 2, 5, 20, 100}) {
+        const Tails tails = exact_rank_sum_tails(untied_choice_scores(300, 300, u), 1);
+        const Tails truth = rank_sum_tails(untied_choice_scores(300, 300, u));
+        EXPECT_NEAR(tails.lower / truth.lower, 1, 1e-11) << u;
+    }
 }
 
 TEST(ExactLaws, give_up_where_the_time_allowed_is_too_short) {
