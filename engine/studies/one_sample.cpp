@@ -125,11 +125,12 @@ double dropped_p(const OneSample<Int>& sample, const Int& margin, Side side, boo
     return normal_p(static_cast<double>(ranking.doubled_positive_sum) / 2, signed_rank_moments(ranking), side);
 }
 
-// The indices of the values to look at: all of a small sample, twenty on either side of a limit in a large one.
+// The indices of the values to look at: all of a small sample, those next to either limit in a large one.
 template <class Int>
 std::vector<std::size_t> indices_near_limits(const std::vector<Int>& values, const Outcome& outcome, const Grid& grid) {
     constexpr std::size_t small = 60;
-    constexpr std::size_t near = 20;
+    constexpr std::size_t large = 500;
+    const std::size_t near = values.size() > large ? 4 : 20; // one value weighs less among many
     std::vector<std::size_t> indices;
     const auto take = [&](std::size_t begin, std::size_t end) {
         for (std::size_t i = std::max(begin, indices.empty() ? 0 : indices.back() + 1); i < end; ++i) {
