@@ -111,11 +111,16 @@ std::string zeros(const Outcome& outcome) {
         outcome.study == StudyId::pairs
             ? counted(outcome.zeros, "pair did not change", "pairs did not change")
             : counted(outcome.zeros, "value equals the tested value", "values equal the tested value");
-    const std::string rule = outcome.settings.test == Test::sign     ? "the sign test sets them aside"
-                             : outcome.settings.zeros == Zeros::drop ? "they were dropped before ranking (zeros=drop); "
-                                                                       "zeros=pratt ranks them first"
-                                                                     : "they were ranked and then set aside "
-                                                                       "(zeros=pratt)";
+    const bool one = outcome.zeros == 1;
+    const std::string they = one ? "it was" : "they were";
+    const std::string rule = outcome.settings.test == Test::sign
+                                 ? "the sign test sets " + std::string(one ? "it" : "them") + " aside"
+                             : outcome.settings.zeros == Zeros::drop ? they +
+                                                                           " dropped before ranking (zeros=drop); "
+                                                                           "zeros=pratt ranks " +
+                                                                           std::string(one ? "it" : "them") + " first"
+                                                                     : they + " ranked and then set aside "
+                                                                              "(zeros=pratt)";
     const bool many = 2 * outcome.zeros >= outcome.n;
     return what + ": " + rule + "." +
            (many ? " That is half of them or more, so p speaks of the minority that changed: report the count too."

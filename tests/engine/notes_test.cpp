@@ -110,7 +110,7 @@ TEST(Notes, approximation_asked_for) {
 
 TEST(Notes, zeros_dropped) {
     expect_only(test::changes({0, -4, -3, -1.5, 1, 2, 3.5, 5, 6, 7.5, 9}),
-                "1 pair did not change: they were dropped before ranking (zeros=drop); zeros=pratt ranks them first.");
+                "1 pair did not change: it was dropped before ranking (zeros=drop); zeros=pratt ranks it first.");
 }
 
 TEST(Notes, zeros_ranked) {
@@ -120,7 +120,7 @@ TEST(Notes, zeros_ranked) {
 
 TEST(Notes, zeros_under_the_sign_test_of_single_values) {
     expect_only(test::single({5, -4, -3, -1.5, 1, 2, 3.5, 6, 7.5, 9}, 5, "test=sign"),
-                "1 value equals the tested value: the sign test sets them aside.");
+                "1 value equals the tested value: the sign test sets it aside.");
 }
 
 TEST(Notes, half_of_the_pairs_unchanged) {
