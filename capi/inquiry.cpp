@@ -33,40 +33,49 @@ void check_size(std::string_view argument, const Borrowed& data) {
     }
 }
 
-Cell converted(const rks_cell& cell, const Place& place) {
-    const auto refuse = [&](const char* why) { throw Refusal(Status::bad_call, why, place); };
+// Why a cell cannot be read; null where it can.
+const char* fault_of(const rks_cell& cell) {
     if (cell.reserved != 0) {
-        refuse("the cell's member `reserved` must be 0.");
+        return "the cell's member `reserved` must be 0.";
     }
-    switch (cell.kind) {
-    case RKS_CELL_BLANK:
-        return {};
-    case RKS_CELL_NUMBER:
-        return Cell::of(cell.number);
-    case RKS_CELL_TEXT:
-        if (cell.text == nullptr && cell.length > 0) {
-            refuse("the cell's text is a null pointer.");
-        }
-        return cell.length == 0 ? Cell{} : Cell::of(std::string_view(cell.text, cell.length));
-    default:
-        refuse("the cell is of an unknown kind.");
+    if (cell.kind != RKS_CELL_BLANK && cell.kind != RKS_CELL_NUMBER && cell.kind != RKS_CELL_TEXT) {
+        return "the cell is of an unknown kind.";
     }
-    return {};
+    return cell.kind == RKS_CELL_TEXT && cell.text == nullptr && cell.length > 0 ? "the cell's text is a null pointer."
+                                                                                 : nullptr;
 }
 
+Cell converted(const rks_cell& cell) {
+    if (cell.kind == RKS_CELL_NUMBER) {
+        return Cell::of(cell.number);
+    }
+    return cell.kind == RKS_CELL_TEXT && cell.length > 0 ? Cell::of(std::string_view(cell.text, cell.length)) : Cell{};
+}
+
+// The data stay with the caller and are converted cell by cell, as they are read.
 Block block_of(const char* argument, const Borrowed& data) {
     Block block{argument, {}, data.rows, data.columns};
-    const std::size_t count = data.rows * data.columns;
-    block.cells.reserve(count);
+    block.lent_size = data.rows * data.columns;
     if (const auto* numbers = std::get_if<const double*>(&data.data)) {
-        for (std::size_t i = 0; i < count; ++i) {
-            block.cells.push_back(Cell::of((*numbers)[i]));
-        }
+        block.lent = [values = *numbers](std::size_t i) { return Cell::of(values[i]); };
     } else if (const auto* cells = std::get_if<const rks_cell*>(&data.data)) {
-        for (std::size_t i = 0; i < count; ++i) {
-            block.cells.push_back(
-                converted((*cells)[i], {argument, i / data.columns + 1, i % data.columns + 1, data.columns}));
+        for (std::size_t i = 0; i < block.lent_size; ++i) {
+            if (const char* fault = fault_of((*cells)[i])) {
+                throw Refusal(Status::bad_call, fault,
+                              {argument, i / data.columns + 1, i % data.columns + 1, data.columns});
+            }
         }
+        block.lent = [list = *cells](std::size_t i) { return converted(list[i]); };
+    }
+    return block;
+}
+
+// The same with cells of its own.
+Block copied_block_of(const char* argument, const Borrowed& data) {
+    const Block lent = block_of(argument, data);
+    Block block{argument, {}, data.rows, data.columns};
+    for (std::size_t i = 0; i < lent.size(); ++i) {
+        block.cells.push_back(lent.at(i));
     }
     return block;
 }
@@ -91,7 +100,8 @@ std::string memo_key(const StudyRow& study, const Settings& settings, const std:
     for (const Block& block : blocks) {
         append(key, block.rows);
         append(key, block.columns);
-        for (const Cell& cell : block.cells) {
+        for (std::size_t i = 0; i < block.size(); ++i) {
+            const Cell cell = block.at(i);
             key += static_cast<char>(cell.kind);
             if (cell.kind == Cell::Kind::number) {
                 append(key, cell.number);
@@ -109,7 +119,7 @@ std::vector<Block> blocks_of(const rks_inquiry& inquiry) {
     for (std::size_t i = 0; i < inquiry.arguments.size(); ++i) {
         const ArgumentRow& row = inquiry.study->arguments[i];
         blocks.push_back(block_of(row.word, inquiry.arguments[i]));
-        if (blocks.back().cells.empty()) {
+        if (blocks.back().size() == 0) {
             throw Refusal(Status::no_data,
                           std::string(row.word) + " is missing. Give the cells that hold it. " + row.help);
         }
@@ -123,7 +133,7 @@ std::shared_ptr<const Outcome> computed(const rks_inquiry& inquiry) {
     std::size_t cells = 0;
     for (const Block& block : blocks) {
         arguments.push_back(&block);
-        cells += block.cells.size();
+        cells += block.size();
     }
     if (cells > most_memo_cells) {
         return std::make_shared<const Outcome>(inquiry.study->run(arguments, inquiry.settings));
@@ -156,7 +166,7 @@ void lend(rks_inquiry& inquiry, std::string_view argument, const Borrowed& data)
     check_size(word, data);
     if (word == "settings") {
         Settings changed = inquiry.settings;
-        const Block block = block_of("settings", data);
+        const Block block = copied_block_of("settings", data);
         for (const Cell& cell : block.cells) {
             require_utf8(cell.text, "a cell of the settings");
         }

@@ -61,9 +61,15 @@ inline Reading read_z(const Outcome& outcome) {
 }
 
 inline Reading read_accuracy(const Outcome& outcome) {
-    return outcome.relative_error
-               ? Reading(*outcome.relative_error)
-               : Reading(NoAnswer{"p comes from the normal approximation, which has no bound on its error."});
+    if (!outcome.exact) {
+        return NoAnswer{"p comes from " +
+                        std::string(outcome.law == LawKind::saddlepoint ? "the saddlepoint" : "the normal") +
+                        " approximation, which has no bound on its error."};
+    }
+    if (!std::isfinite(*outcome.relative_error)) {
+        return NoAnswer{"p is below the smallest number that can be shown, so no relative error can be stated."};
+    }
+    return *outcome.relative_error;
 }
 
 inline Reading read_n_second(const Outcome& outcome) {
@@ -137,7 +143,7 @@ inline constexpr std::array answer_table{
               "count in 63 bits.",
               every_data_study, [](const Outcome& o) { return reading(o.arrangements); }},
     AnswerRow{"method", "", AnswerKind::text, "How p was obtained.", every_data_study,
-              [](const Outcome& o) -> Reading { return method_words(o); }},
+              [](const Outcome& o) -> Reading { return method_words(o) + law_words(o); }},
     AnswerRow{"accuracy", "", AnswerKind::number, "The bound on the relative error of an exact p.", every_data_study,
               read_accuracy},
     AnswerRow{"smallest p", "", AnswerKind::number,

@@ -4,12 +4,14 @@
 #pragma once
 
 #include "decimal.h"
+#include "refusal.h"
 
 #include <boost/multiprecision/cpp_int.hpp>
 
 #include <algorithm>
 #include <cstdint>
 #include <span>
+#include <string>
 #include <vector>
 
 namespace rankstead {
@@ -49,25 +51,49 @@ private:
     int highest_ = 0;
 };
 
+// Puts decimals on a grid; keeps the powers of ten that it needs.
+template <class Int>
+class Scale {
+public:
+    explicit Scale(const Grid& grid) : exponent_(grid.exponent) {}
+
+    [[nodiscard]] Int of(const Decimal& value) {
+        if (value.coefficient == 0) {
+            return Int(0);
+        }
+        const auto power = static_cast<std::size_t>(value.exponent - exponent_);
+        while (powers_.size() <= power) {
+            powers_.push_back(Int(powers_.back() * 10));
+        }
+        return Int(Int(value.coefficient) * powers_[power]);
+    }
+
+private:
+    std::int32_t exponent_;
+    std::vector<Int> powers_{Int(1)};
+};
+
 template <class Int>
 [[nodiscard]] Int on_grid(const Decimal& value, const Grid& grid) {
-    if (value.coefficient == 0) {
-        return Int(0);
-    }
-    Int scaled(value.coefficient);
-    for (std::int32_t e = value.exponent; e > grid.exponent; --e) {
-        scaled *= 10;
-    }
-    return scaled;
+    return Scale<Int>(grid).of(value);
 }
 
 template <class Int>
 [[nodiscard]] std::vector<Int> on_grid(std::span<const Decimal> values, const Grid& grid) {
+    Scale<Int> scale(grid);
     std::vector<Int> scaled;
     scaled.reserve(values.size());
     for (const Decimal& value : values) {
-        scaled.push_back(on_grid<Int>(value, grid));
+        scaled.push_back(scale.of(value));
     }
+    return scaled;
+}
+
+// The same, and gives the decimals' memory back.
+template <class Int>
+[[nodiscard]] std::vector<Int> moved_on_grid(std::vector<Decimal>&& values, const Grid& grid) {
+    std::vector<Int> scaled = on_grid<Int>(values, grid);
+    std::vector<Decimal>().swap(values);
     return scaled;
 }
 
@@ -79,6 +105,18 @@ template <class Int>
         digits *= 5;
     }
     return nearest_double(digits.str(), grid.exponent - halvings);
+}
+
+// Integers of hundreds of digits take their time: throws Refusal where there would be too many of them.
+inline void require_practicable(const Grid& grid, std::size_t values) {
+    constexpr std::size_t most = 200'000;
+    if (!grid.fits128() && values > most) {
+        throw Refusal(Status::too_large, "from the largest value to the last decimal of the smallest there are " +
+                                             std::to_string(grid.digits) +
+                                             " digits. So wide a range can be computed for up to 200000 values, and "
+                                             "here are " +
+                                             std::to_string(values) + ". Look for a value that is a slip.");
+    }
 }
 
 // Calls work.template operator()<Int>() with the narrowest type that the grid fits.

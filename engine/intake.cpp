@@ -11,10 +11,12 @@ namespace rankstead {
 
 namespace {
 
-// Each cell of an argument as a decimal or nothing, with the ledger so far; `used` is counted by the caller.
+// Each cell of an argument as a decimal, or zero where there is none, with the ledger so far; `used` is counted by the
+// caller.
 struct Slots {
     std::string heading;
-    std::vector<std::optional<Decimal>> values;
+    std::vector<Decimal> values;
+    std::vector<bool> filled;
     Ledger ledger;
 };
 
@@ -54,9 +56,9 @@ bool has_letter(std::string_view text) {
 
 class SlotReader {
 public:
-    // `selected` counts the cells of the whole selection: a heading above nothing but blanks is still one.
-    SlotReader(const Block& block, const Settings& settings, std::size_t selected)
-        : block_(block), settings_(settings), selected_(selected) {
+    // Reads the first `count` cells of the block.
+    SlotReader(const Block& block, const Settings& settings, std::size_t count)
+        : block_(block), settings_(settings), count_(count) {
         for (const std::string& word : settings.missing) {
             missing_.push_back(folded(word));
         }
@@ -64,17 +66,20 @@ public:
 
     Slots read() {
         slots_.ledger.argument = block_.argument;
-        slots_.ledger.seen = block_.cells.size();
-        slots_.values.reserve(block_.cells.size());
-        for (std::size_t i = 0; i < block_.cells.size(); ++i) {
-            slots_.values.push_back(read_cell(i));
+        slots_.ledger.seen = count_;
+        slots_.values.reserve(count_);
+        slots_.filled.reserve(count_);
+        for (std::size_t i = 0; i < count_; ++i) {
+            const std::optional<Decimal> value = read_cell(i);
+            slots_.values.push_back(value.value_or(Decimal{}));
+            slots_.filled.push_back(value.has_value());
         }
         return std::move(slots_);
     }
 
 private:
     std::optional<Decimal> read_cell(std::size_t index) {
-        const Cell& cell = block_.cells[index];
+        const Cell cell = block_.at(index);
         if (cell.kind == Cell::Kind::number) {
             return read_double(cell.number, index);
         }
@@ -116,8 +121,9 @@ private:
         refuse_text(text, index);
     }
 
+    // A heading above nothing but blanks is still one.
     bool is_heading(std::string_view text, std::size_t index) const {
-        return index == 0 && selected_ > 1 && has_letter(text) && !is_beyond_limit(text) &&
+        return index == 0 && block_.size() > 1 && has_letter(text) && !is_beyond_limit(text) &&
                !is_number_in_some_way(text) && !is_known_missing_word(text);
     }
 
@@ -141,44 +147,47 @@ private:
 
     const Block& block_;
     const Settings& settings_;
-    std::size_t selected_;
+    std::size_t count_;
     std::vector<std::string> missing_;
     Slots slots_;
 };
 
-Slots read_slots(const Block& block, const Settings& settings, std::size_t selected) {
-    return SlotReader(block, settings, selected).read();
+Slots read_slots(const Block& block, const Settings& settings, std::size_t count) {
+    return SlotReader(block, settings, count).read();
 }
 
 Column column_of(Slots&& slots) {
-    Column column{std::move(slots.heading), {}, std::move(slots.ledger)};
-    column.values.reserve(slots.values.size());
-    for (const auto& value : slots.values) {
-        if (value) {
-            column.values.push_back(*value);
+    std::size_t kept = 0;
+    for (std::size_t i = 0; i < slots.values.size(); ++i) {
+        if (slots.filled[i]) {
+            slots.values[kept++] = slots.values[i];
         }
     }
-    column.ledger.used = column.values.size();
-    return column;
+    slots.values.resize(kept);
+    slots.ledger.used = kept;
+    return {std::move(slots.heading), std::move(slots.values), std::move(slots.ledger)};
 }
 
 [[noreturn]] void refuse_empty(const Block& block) {
     throw Refusal(Status::no_data, block.argument + ": there is not one value among its " +
-                                       std::to_string(block.cells.size()) + " cells. Select cells that hold numbers.");
+                                       std::to_string(block.size()) + " cells. Select cells that hold numbers.");
 }
 
 // A selection often reaches beyond the data; what is blank below the last filled cell is not a missing value.
-void drop_blanks_at_the_end(Block& block) {
-    const auto is_filled = [](const Cell& cell) {
-        return cell.kind == Cell::Kind::number || (cell.kind == Cell::Kind::text && !trimmed(cell.text).empty());
+std::size_t size_without_blanks_at_the_end(const Block& block) {
+    std::size_t size = block.size();
+    const auto is_blank = [](const Cell& cell) {
+        return cell.kind == Cell::Kind::blank || (cell.kind == Cell::Kind::text && trimmed(cell.text).empty());
     };
-    const auto last = std::find_if(block.cells.rbegin(), block.cells.rend(), is_filled);
-    block.cells.erase(last.base(), block.cells.end());
+    while (size > 0 && is_blank(block.at(size - 1))) {
+        --size;
+    }
+    return size;
 }
 
 void check_headings(const Slots& first, const Slots& second, const Block& second_block, const Block& first_block) {
-    const bool one = first.ledger.heading > 0 && second.ledger.heading == 0 && second.values.front().has_value();
-    const bool other = second.ledger.heading > 0 && first.ledger.heading == 0 && first.values.front().has_value();
+    const bool one = first.ledger.heading > 0 && second.ledger.heading == 0 && second.filled.front();
+    const bool other = second.ledger.heading > 0 && first.ledger.heading == 0 && first.filled.front();
     if (one || other) {
         const Block& number = one ? second_block : first_block;
         const Block& heading = one ? first_block : second_block;
@@ -189,40 +198,37 @@ void check_headings(const Slots& first, const Slots& second, const Block& second
     }
 }
 
-void keep_complete_rows(PairedColumns& pairs, const Slots& first, const Slots& second) {
-    for (std::size_t i = 0; i < first.values.size(); ++i) {
-        const auto& a = first.values[i];
-        const auto& b = second.values[i];
-        if (a && b) {
-            pairs.first.values.push_back(*a);
-            pairs.second.values.push_back(*b);
-        } else {
-            pairs.first.ledger.unpaired += a ? 1U : 0U;
-            pairs.second.ledger.unpaired += b ? 1U : 0U;
-        }
-    }
-    pairs.first.ledger.used = pairs.second.ledger.used = pairs.first.values.size();
+bool are_different_numbers(const Cell& a, const Cell& b) {
+    return a.kind == Cell::Kind::number && b.kind == Cell::Kind::number && a.number != b.number;
 }
 
-std::size_t count_equal_decimals(const Block& first, const Block& second) {
-    std::size_t count = 0;
-    for (std::size_t i = 0; i < first.cells.size(); ++i) {
-        const Cell& a = first.cells[i];
-        const Cell& b = second.cells[i];
-        if (a.kind == Cell::Kind::number && b.kind == Cell::Kind::number && a.number != b.number &&
-            Decimal::from_double(a.number) == Decimal::from_double(b.number)) {
-            ++count;
+PairedColumns complete_rows(Slots&& a, Slots&& b, const Block& first, const Block& second) {
+    std::size_t kept = 0;
+    std::size_t equal_at_fifteen_digits = 0;
+    for (std::size_t i = 0; i < a.values.size(); ++i) {
+        if (a.filled[i] && b.filled[i]) {
+            const bool equal = a.values[i] == b.values[i];
+            equal_at_fifteen_digits += equal && are_different_numbers(first.at(i), second.at(i)) ? 1U : 0U;
+            a.values[kept] = a.values[i];
+            b.values[kept] = b.values[i];
+            ++kept;
+        } else {
+            a.ledger.unpaired += a.filled[i] ? 1U : 0U;
+            b.ledger.unpaired += b.filled[i] ? 1U : 0U;
         }
     }
-    return count;
+    a.values.resize(kept);
+    b.values.resize(kept);
+    a.ledger.used = b.ledger.used = kept;
+    return {{std::move(a.heading), std::move(a.values), std::move(a.ledger)},
+            {std::move(b.heading), std::move(b.values), std::move(b.ledger)},
+            equal_at_fifteen_digits};
 }
 
 } // namespace
 
 Column read_column(const Block& block, const Settings& settings) {
-    Block filled = block;
-    drop_blanks_at_the_end(filled);
-    Column column = column_of(read_slots(filled, settings, block.cells.size()));
+    Column column = column_of(read_slots(block, settings, size_without_blanks_at_the_end(block)));
     if (column.values.empty()) {
         refuse_empty(block);
     }
@@ -230,24 +236,21 @@ Column read_column(const Block& block, const Settings& settings) {
 }
 
 PairedColumns read_pairs(const Block& first, const Block& second, const Settings& settings) {
-    if (first.cells.size() != second.cells.size()) {
-        throw Refusal(Status::unequal_lengths, first.argument + " has " + std::to_string(first.cells.size()) +
-                                                   " cells and " + second.argument + " has " +
-                                                   std::to_string(second.cells.size()) +
+    if (first.size() != second.size()) {
+        throw Refusal(Status::unequal_lengths, first.argument + " has " + std::to_string(first.size()) + " cells and " +
+                                                   second.argument + " has " + std::to_string(second.size()) +
                                                    ". Pairs are read row by row: select the same rows in both.");
     }
-    Slots a = read_slots(first, settings, first.cells.size());
-    Slots b = read_slots(second, settings, second.cells.size());
+    Slots a = read_slots(first, settings, first.size());
+    Slots b = read_slots(second, settings, second.size());
     if (!a.values.empty()) {
         check_headings(a, b, second, first);
     }
-    PairedColumns pairs{{a.heading, {}, a.ledger}, {b.heading, {}, b.ledger}, 0};
-    keep_complete_rows(pairs, a, b);
+    PairedColumns pairs = complete_rows(std::move(a), std::move(b), first, second);
     if (pairs.first.values.empty()) {
         throw Refusal(Status::no_data, "not one row has a value in both " + first.argument + " and " + second.argument +
                                            ". Select two ranges that hold numbers in the same rows.");
     }
-    pairs.equal_at_fifteen_digits = count_equal_decimals(first, second);
     return pairs;
 }
 

@@ -67,10 +67,10 @@ std::string all_equal(const Outcome& outcome) {
     if (unchanged) {
         return "Every value equals the tested value, so there is nothing to test: p is 1.";
     }
-    if (is_groups(outcome) && outcome.n > 1 && outcome.tied == outcome.n && outcome.smallest_p == 1 &&
-        outcome.first.description.lower_quartile == outcome.first.description.upper_quartile &&
-        outcome.first.description.median == outcome.second->description.median) {
-        return "All values are equal, so the groups cannot be told apart: p is 1.";
+    if (outcome.observations.all_tied) {
+        return std::string("All values are equal") +
+               (outcome.settings.margin == Decimal{} ? "" : " once the margin is taken off") +
+               ", so the groups cannot be told apart: p is 1.";
     }
     return "";
 }
@@ -90,10 +90,19 @@ std::string no_limits(const Outcome& outcome) {
 }
 
 std::string too_long(const Outcome& outcome) {
-    return outcome.observations.exact_wanted_but_too_long
-               ? "The exact law of so many values would take too long, so p and the limits come from the normal "
-                 "approximation. With this many values it is close, except for very small p."
-               : "";
+    const Observations& seen = outcome.observations;
+    if (!seen.exact_wanted_but_too_long && !seen.limits_approximate) {
+        return "";
+    }
+    const NumberWriter writer(outcome.settings.decimal_sign);
+    const bool close = seen.approximation_error < 0.5;
+    return "The exact law of so many values would take too long, so " +
+           std::string(seen.exact_wanted_but_too_long ? "p and the limits come" : "the limits come, unlike p,") +
+           " from the saddlepoint approximation. " +
+           (close ? "Wherever it was compared with the exact p, it was within " +
+                        writer.percent(std::max(seen.approximation_error, 0.0001)) + " of it for p above 0.0001."
+                  : "With so few values in the smaller group, or on so few different ones, it may be off by a factor "
+                    "of two or three.");
 }
 
 std::string asked_for_approximation(const Outcome& outcome) {

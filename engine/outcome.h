@@ -4,6 +4,7 @@
 #include "estimates/chance.h"
 #include "estimates/description.h"
 #include "intake.h"
+#include "laws/tails.h"
 #include "settings.h"
 
 #include <cstdint>
@@ -32,9 +33,12 @@ struct Sample {
 
 // What the notes look at besides the answers themselves.
 struct Observations {
-    bool exact_wanted_but_too_long = false;
+    bool exact_wanted_but_too_long = false; // p comes from the saddlepoint approximation
+    bool limits_approximate = false;        // a law that the limits needed did
+    double approximation_error = 0;         // the relative error to expect of it
     bool lopsided = false;       // differences far from symmetric, where the signed rank test expects symmetry
     bool spreads_differ = false; // interquartile ranges of two groups
+    bool all_tied = false;       // every value of both groups, the margin taken off, is the same
     std::size_t equal_at_fifteen_digits = 0;
     std::vector<double> exceptional_margins; // zeros=drop: margins where p and the limits disagree
     std::string interval_reason;             // why there are no limits
@@ -56,6 +60,7 @@ struct Outcome {
     double p = 1;
     std::optional<double> z;
     bool exact = true;
+    LawKind law = LawKind::counted;       // how p was found
     std::optional<double> relative_error; // of p, where exact
     std::string arrangements;             // "43 of 1,024", empty where the counts do not fit
     double smallest_p = 1;

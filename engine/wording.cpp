@@ -8,6 +8,7 @@
 #include <array>
 #include <charconv>
 #include <cmath>
+#include <limits>
 
 namespace rankstead {
 
@@ -62,6 +63,9 @@ std::string NumberWriter::number(double value) const {
     constexpr int significant = 6;
     if (value == 0) {
         return "0";
+    }
+    if (!std::isfinite(value)) {
+        return "beyond " + number(std::copysign(std::numeric_limits<double>::max(), value));
     }
     const double size = std::fabs(value);
     if (size >= 1e15 || size < 1e-5) {
@@ -214,7 +218,29 @@ std::string method_words(const Outcome& outcome) {
             outcome.tied > 0 && !(outcome.settings.test == Test::sign && outcome.study != StudyId::groups);
         return "exact" + std::string(ties ? ", conditional on the ties" : "") + zeros_words(outcome);
     }
+    if (outcome.law == LawKind::saddlepoint) {
+        return "saddlepoint approximation with lattice correction" + zeros_words(outcome);
+    }
     return "normal approximation, tie-corrected, with continuity correction" + zeros_words(outcome);
+}
+
+std::string law_words(const Outcome& outcome) {
+    switch (outcome.law) {
+    case LawKind::counted:
+        return ", by counting arrangements";
+    case LawKind::summed:
+        return ", by dynamic programming";
+    case LawKind::closed:
+        return ", by inversion of the closed characteristic function";
+    case LawKind::inverted:
+        return ", by inversion of the characteristic function";
+    case LawKind::binomial:
+        return ", by the binomial law";
+    case LawKind::saddlepoint:
+    case LawKind::normal:
+        break;
+    }
+    return "";
 }
 
 std::string methods_sentence(const Outcome& outcome) {

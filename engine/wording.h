@@ -33,6 +33,8 @@ private:
 [[nodiscard]] std::string methods_sentence(const Outcome& outcome);
 // How p was obtained.
 [[nodiscard]] std::string method_words(const Outcome& outcome);
+// How an exact law was found, to follow the method; empty for an approximation.
+[[nodiscard]] std::string law_words(const Outcome& outcome);
 [[nodiscard]] std::string ledger_words(const Outcome& outcome);
 
 // The caution beside results: one quiet line, and in full.

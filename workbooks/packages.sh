@@ -6,6 +6,7 @@ BUILD_PACKAGES=(g++ cmake ninja-build pkg-config libboost-dev libcxxopts-dev nlo
 OFFICE_PACKAGES=(libreoffice-dev python3-uno)
 PICTURE_PACKAGES=(poppler-utils fonts-liberation)
 TEST_PACKAGES=(libgtest-dev libbenchmark-dev python3-scipy clang libclang-rt-14-dev clang-format-14 clang-tidy-14)
+BENCH_PACKAGES=(libbenchmark-dev python3-scipy python3-matplotlib) # tests/bench/goals.sh alone
 
 package_is_installed() {
     [ "$(dpkg-query -W -f='${db:Status-Status}' "$1" 2>/dev/null)" = installed ]

@@ -24,10 +24,21 @@ struct Gap {
 // answer for each k by itself.
 using GapTails = std::function<Gap(std::int64_t k)>;
 
-// The smallest k in 0..last whose upper tail exceeds `rate`; the gap `last` always does. `guess` and `spread` only save
-// steps.
-[[nodiscard]] std::int64_t first_gap_inside(const GapTails& tails, std::int64_t last, const Fraction& rate,
-                                            std::int64_t guess, double spread);
+// The tails in every gap; `rough` may be empty, or finds the neighbourhood of a limit more quickly than exact laws do.
+struct GapLaw {
+    GapTails tails;
+    GapTails rough;
+};
+
+// The smallest k in 0..last whose upper tail exceeds a rate (the gap `last` always does), and the tails just outside.
+struct FirstInside {
+    std::int64_t k = 0;
+    std::optional<Tails> outside; // none where k is 0
+};
+
+// `guess` and `spread` only save steps.
+[[nodiscard]] FirstInside first_gap_inside(const GapLaw& law, std::int64_t last, const Fraction& rate,
+                                           std::int64_t guess, double spread);
 
 // Where to start: the normal approximation to the critical number of breakpoints.
 [[nodiscard]] std::int64_t guessed_gap(std::int64_t breakpoints, double spread, const Fraction& rate);
@@ -40,27 +51,28 @@ struct LowerLimit {
 
 // `interval=matching`: the outside gap is the nearest one with another breakpoint below.
 template <class Int>
-[[nodiscard]] LowerLimit<Int> matching_lower_limit(const OrderedSums<Int>& breakpoints, const GapTails& tails,
+[[nodiscard]] LowerLimit<Int> matching_lower_limit(const OrderedSums<Int>& breakpoints, const GapLaw& law,
                                                    const Fraction& rate, double spread) {
     const std::int64_t last = breakpoints.size();
-    const std::int64_t k = first_gap_inside(tails, last, rate, guessed_gap(last, spread, rate), spread);
-    if (k == 0) {
+    const FirstInside found = first_gap_inside(law, last, rate, guessed_gap(last, spread, rate), spread);
+    if (!found.outside) {
         return {};
     }
-    const Int value = breakpoints.at(k);
-    return {value, tails(breakpoints.count_below(value)).tails.upper};
+    const auto place = breakpoints.place(found.k);
+    const bool known = place.below == found.k - 1;
+    return {place.value, known ? found.outside->upper : law.tails(place.below).tails.upper};
 }
 
 // `interval=table`: the closed order-statistic interval of the law without ties, V(k) with V(M+1-k) above it.
 template <class Int>
-[[nodiscard]] LowerLimit<Int> table_lower_limit(const OrderedSums<Int>& breakpoints, const GapTails& untied,
+[[nodiscard]] LowerLimit<Int> table_lower_limit(const OrderedSums<Int>& breakpoints, const GapLaw& untied,
                                                 const Fraction& rate, double spread) {
     const std::int64_t last = breakpoints.size();
-    const std::int64_t k = first_gap_inside(untied, last, rate, guessed_gap(last, spread, rate), spread);
-    if (k == 0) {
+    const FirstInside found = first_gap_inside(untied, last, rate, guessed_gap(last, spread, rate), spread);
+    if (!found.outside) {
         return {};
     }
-    return {breakpoints.at(k), untied(k - 1).tails.upper};
+    return {breakpoints.at(found.k), found.outside->upper};
 }
 
 } // namespace rankstead

@@ -1,6 +1,7 @@
 #include "ordered_sums.h"
 
 #include "../grid.h"
+#include "staircase.h"
 
 #include <algorithm>
 #include <cmath>
@@ -10,38 +11,71 @@ namespace rankstead {
 namespace {
 
 // A small generator for pivots (splitmix64, Steele et al. 2014): the result of a selection does not depend on it.
-std::uint64_t scrambled(std::uint64_t& state) {
-    state += 0x9E3779B97F4A7C15U;
-    std::uint64_t z = state;
+std::uint64_t scrambled(std::uint64_t state) {
+    std::uint64_t z = state * 0x9E3779B97F4A7C15U;
     z = (z ^ (z >> 30U)) * 0xBF58476D1CE4E5B9U;
     z = (z ^ (z >> 27U)) * 0x94D049BB133111EBU;
     return z ^ (z >> 31U);
 }
 
-constexpr std::int64_t sample_size = 600;
+// Every c-th member serves as the guess for all, with c near the fifth root of the length, and odd, so that each is the
+// middle of the c around it.
+std::int64_t thinning(std::size_t length) {
+    constexpr std::size_t short_list = 9;
+    const auto root = static_cast<std::int64_t>(std::pow(static_cast<double>(length), 0.2));
+    return length < short_list ? 1 : std::max<std::int64_t>(3, root + 1 - root % 2);
+}
+
+// The middles of stretches of about c members each.
+template <class Int>
+std::vector<Int> every(std::int64_t c, const std::vector<Int>& list) {
+    const std::size_t length = list.size() / static_cast<std::size_t>(c);
+    std::vector<Int> thinned;
+    thinned.reserve(length);
+    for (std::size_t i = 0; i < length; ++i) {
+        thinned.push_back(list[(2 * i + 1) * list.size() / (2 * length)]);
+    }
+    return thinned;
+}
+
+template <class Int>
+std::vector<Int> reversed_negated(const std::vector<Int>& sorted) {
+    std::vector<Int> result(sorted.rbegin(), sorted.rend());
+    for (Int& value : result) {
+        value = -value;
+    }
+    return result;
+}
+
+template <class Int>
+std::shared_ptr<const std::vector<Int>> shared(std::vector<Int> list) {
+    return std::make_shared<const std::vector<Int>>(std::move(list));
+}
 
 } // namespace
 
 template <class Int>
-OrderedSums<Int>::OrderedSums(std::vector<Int> a, std::vector<Int> b, bool triangle)
-    : a_(std::move(a)), b_(std::move(b)), triangle_(triangle) {
-    const auto m = static_cast<std::int64_t>(a_.size());
-    const auto n = static_cast<std::int64_t>(b_.size());
+OrderedSums<Int>::OrderedSums(List a, List b, bool triangle) : a_(std::move(a)), b_(std::move(b)), triangle_(triangle) {
+    constexpr std::int64_t always_few = 400;
+    const auto m = static_cast<std::int64_t>(a_->size());
+    const auto n = static_cast<std::int64_t>(b_->size());
     size_ = triangle_ ? n * (n + 1) / 2 : m * n;
+    few_ = std::max(always_few, m + n);
 }
 
 template <class Int>
+OrderedSums<Int>::OrderedSums(std::vector<Int> a, std::vector<Int> b, bool triangle)
+    : OrderedSums(shared(std::move(a)), shared(std::move(b)), triangle) {}
+
+template <class Int>
 OrderedSums<Int> OrderedSums<Int>::differences(const std::vector<Int>& x, const std::vector<Int>& y) {
-    std::vector<Int> minus_y(y.rbegin(), y.rend());
-    for (Int& value : minus_y) {
-        value = -value;
-    }
-    return {x, std::move(minus_y), false};
+    return {x, reversed_negated(y), false};
 }
 
 template <class Int>
 OrderedSums<Int> OrderedSums<Int>::walsh(const std::vector<Int>& d) {
-    return {d, d, true};
+    const List list = shared(d);
+    return {list, list, true};
 }
 
 template <class Int>
@@ -50,168 +84,166 @@ OrderedSums<Int> OrderedSums<Int>::values(const std::vector<Int>& d) {
 }
 
 template <class Int>
-template <class Inside, class Visit>
-void OrderedSums<Int>::walk(Inside inside, Visit visit) const {
-    auto end = static_cast<std::int64_t>(b_.size());
-    for (std::int64_t i = 0; i < static_cast<std::int64_t>(a_.size()); ++i) {
-        const std::int64_t first = first_column(i);
-        while (end > 0 && !inside(sum(i, end - 1))) {
-            --end;
-        }
-        visit(i, std::max(end, first));
+OrderedSums<Int> OrderedSums<Int>::mirrored() const {
+    OrderedSums other(*this);
+    other.mirrored_ = !mirrored_;
+    return other;
+}
+
+template <class Int>
+typename OrderedSums<Int>::Place OrderedSums<Int>::place(std::int64_t k) const {
+    if (!mirrored_) {
+        return select(k, k).first;
     }
+    const Place place = select(size_ + 1 - k, size_ + 1 - k).first;
+    return {Int(-place.value), size_ - place.through, size_ - place.below};
 }
 
 template <class Int>
-std::int64_t OrderedSums<Int>::count_at_most(const Int& value) const {
-    std::int64_t count = 0;
-    walk([&](const Int& s) { return s <= value; },
-         [&](std::int64_t i, std::int64_t end) { count += end - first_column(i); });
-    return count;
+std::pair<Int, Int> OrderedSums<Int>::pair_at(std::int64_t k) const {
+    const std::int64_t lower = mirrored_ ? size_ - k : k;
+    const auto [one, other] = select(lower, lower + 1);
+    return mirrored_ ? std::pair(Int(-other.value), Int(-one.value)) : std::pair(one.value, other.value);
 }
 
 template <class Int>
-std::int64_t OrderedSums<Int>::count_below(const Int& value) const {
-    std::int64_t count = 0;
-    walk([&](const Int& s) { return s < value; },
-         [&](std::int64_t i, std::int64_t end) { count += end - first_column(i); });
-    return count;
+typename OrderedSums<Int>::Level OrderedSums<Int>::lowest() const {
+    Level level{Int(sum(0, 0) - 1), std::vector<std::uint32_t>(a_->size()), 0};
+    for (std::size_t i = 0; triangle_ && i < level.ends.size(); ++i) {
+        level.ends[i] = static_cast<std::uint32_t>(i);
+    }
+    return level;
 }
 
 template <class Int>
-Int OrderedSums<Int>::next_above(const Int& value) const {
-    bool found = false;
-    Int best(0);
-    walk([&](const Int& s) { return s <= value; },
-         [&](std::int64_t i, std::int64_t end) {
-             if (end < static_cast<std::int64_t>(b_.size())) {
-                 const Int candidate = sum(i, end);
-                 best = found ? std::min(best, candidate) : candidate;
-                 found = true;
-             }
-         });
-    return best;
+typename OrderedSums<Int>::Level OrderedSums<Int>::highest() const {
+    const std::vector<std::uint32_t> ends(a_->size(), static_cast<std::uint32_t>(b_->size()));
+    return {sum(a_->size() - 1, b_->size() - 1), ends, size_};
 }
 
 template <class Int>
-Int OrderedSums<Int>::next_below(const Int& value) const {
-    bool found = false;
-    Int best(0);
-    walk([&](const Int& s) { return s < value; },
-         [&](std::int64_t i, std::int64_t end) {
-             if (end > first_column(i)) {
-                 const Int candidate = sum(i, end - 1);
-                 best = found ? std::max(best, candidate) : candidate;
-                 found = true;
-             }
-         });
-    return best;
+typename OrderedSums<Int>::Level OrderedSums<Int>::level(const Int& value) const {
+    Level level = lowest();
+    const Staircase<Int> staircase(*a_, *b_, triangle_, value);
+    level.value = value;
+    level.through = staircase.mark(level.ends);
+    if (triangle_) {
+        level.through -= staircase.rows() * (staircase.rows() - 1) / 2; // what lies before the diagonal
+    }
+    return level;
 }
 
+// Two values with the k-th and the next-th smallest probably between them. Each sum of the thinned lists stands for
+// c times d of all. The staircase cuts through about as many of these blocks as the lists have members, each by chance,
+// which throws the count off by 0.3 times the square root of their number; that is allowed for three times over.
 template <class Int>
-void OrderedSums<Int>::keep_above(std::vector<Row>& rows, const Int& value) const {
-    walk([&](const Int& s) { return s <= value; },
-         [&](std::int64_t i, std::int64_t end) {
-             Row& row = rows[static_cast<std::size_t>(i)];
-             row.low = std::max(row.low, static_cast<std::uint32_t>(end));
-         });
+std::pair<Int, Int> OrderedSums<Int>::guess(std::int64_t k, std::int64_t next) const {
+    const List rows = shared(every(thinning(a_->size()), *a_));
+    const List columns = triangle_ ? rows : shared(every(thinning(b_->size()), *b_));
+    const OrderedSums thinned(rows, columns, triangle_);
+    const double share = static_cast<double>(thinned.size_) / static_cast<double>(size_);
+    const double reach = std::sqrt(static_cast<double>(rows->size() + columns->size())) + 1;
+    const auto low = static_cast<std::int64_t>(static_cast<double>(k) * share - reach);
+    const auto high = static_cast<std::int64_t>(static_cast<double>(next) * share + reach) + 1;
+    const auto found = thinned.select(std::max<std::int64_t>(low, 1), std::min(high, thinned.size_));
+    return {low < 1 ? Int(sum(0, 0) - 1) : found.first.value,
+            high > thinned.size_ ? sum(a_->size() - 1, b_->size() - 1) : found.second.value};
 }
 
+// Two of the sums between the levels, around the k-th smallest of all, from a random sample.
 template <class Int>
-void OrderedSums<Int>::keep_at_most(std::vector<Row>& rows, const Int& value) const {
-    walk([&](const Int& s) { return s <= value; },
-         [&](std::int64_t i, std::int64_t end) {
-             Row& row = rows[static_cast<std::size_t>(i)];
-             row.high = std::min(row.high, static_cast<std::uint32_t>(end));
-         });
-}
-
-// Candidates drawn evenly, as sums, sorted.
-template <class Int>
-std::vector<Int> OrderedSums<Int>::sample(const std::vector<Row>& rows, std::int64_t candidates,
-                                          std::uint64_t seed) const {
+std::pair<Int, Int> OrderedSums<Int>::sampled_guess(const Level& low, const Level& high, std::int64_t k) const {
+    constexpr std::size_t sample_size = 600;
+    const auto candidates = static_cast<std::uint64_t>(high.through - low.through);
     std::vector<std::int64_t> picks;
-    for (std::int64_t s = 0; s < sample_size; ++s) {
-        picks.push_back(static_cast<std::int64_t>(scrambled(seed) % static_cast<std::uint64_t>(candidates)));
+    for (std::uint64_t s = 1; s <= sample_size; ++s) {
+        picks.push_back(static_cast<std::int64_t>(scrambled(candidates + s) % candidates));
     }
     std::sort(picks.begin(), picks.end());
     std::vector<Int> sums;
     std::int64_t before = 0;
-    auto pick = picks.begin();
-    for (std::size_t i = 0; i < rows.size() && pick != picks.end(); ++i) {
-        const std::int64_t width = rows[i].high > rows[i].low ? rows[i].high - rows[i].low : 0;
-        for (; pick != picks.end() && *pick < before + width; ++pick) {
-            sums.push_back(sum(static_cast<std::int64_t>(i), rows[i].low + (*pick - before)));
+    for (std::size_t i = 0; i < low.ends.size() && sums.size() < sample_size; ++i) {
+        const std::int64_t width = std::max(high.ends[i], low.ends[i]) - low.ends[i];
+        for (; sums.size() < sample_size && picks[sums.size()] < before + width;) {
+            sums.push_back(sum(i, static_cast<std::size_t>(low.ends[i] + picks[sums.size()] - before)));
         }
         before += width;
     }
     std::sort(sums.begin(), sums.end());
-    return sums;
+    const double share = static_cast<double>(k - low.through) / static_cast<double>(candidates);
+    const double centre = share * sample_size;
+    const double reach = 2.5 * std::sqrt(centre * (1 - share)) + 2;
+    const auto pick = [&](double place) {
+        return sums[static_cast<std::size_t>(std::clamp(place, 0.0, sample_size - 1.0))];
+    };
+    return {pick(centre - reach), pick(centre + reach)};
 }
 
 template <class Int>
-Int OrderedSums<Int>::select_among(const std::vector<Row>& rows, std::int64_t candidates, std::int64_t k) const {
+std::pair<typename OrderedSums<Int>::Place, typename OrderedSums<Int>::Place>
+OrderedSums<Int>::select_between(const Level& low, const Level& high, std::int64_t k, std::int64_t next) const {
     std::vector<Int> sums;
-    sums.reserve(static_cast<std::size_t>(candidates));
-    for (std::size_t i = 0; i < rows.size(); ++i) {
-        for (std::int64_t j = rows[i].low; j < rows[i].high; ++j) {
-            sums.push_back(sum(static_cast<std::int64_t>(i), j));
+    sums.reserve(static_cast<std::size_t>(high.through - low.through));
+    for (std::size_t i = 0; i < low.ends.size(); ++i) {
+        for (std::size_t j = low.ends[i]; j < high.ends[i]; ++j) {
+            sums.push_back(sum(i, j));
         }
     }
-    const auto nth = sums.begin() + (k - 1);
-    std::nth_element(sums.begin(), nth, sums.end());
-    return *nth;
+    const auto kth = sums.begin() + (k - low.through - 1);
+    const auto nth = sums.begin() + (next - low.through - 1);
+    std::nth_element(sums.begin(), kth, sums.end());
+    if (nth != kth) {
+        std::nth_element(kth + 1, nth, sums.end());
+    }
+    const auto place_of = [&](const Int& value) {
+        const auto below = std::count_if(sums.begin(), sums.end(), [&](const Int& s) { return s < value; });
+        const auto equal = std::count(sums.begin(), sums.end(), value);
+        return Place{value, low.through + below, low.through + below + equal};
+    };
+    return {place_of(*kth), place_of(*nth)};
+}
+
+// Narrows the bracket until what is left is one value many times or few enough to be written down.
+template <class Int>
+typename OrderedSums<Int>::Place OrderedSums<Int>::settle(Level low, Level high, std::int64_t k) const {
+    while (high.through - low.through > few_) {
+        Level under = level(Int(high.value - 1));
+        if (under.through < k) {
+            return {high.value, under.through, high.through};
+        }
+        high = std::move(under);
+        const auto [one, other] = sampled_guess(low, high, k);
+        for (const Int& pivot : {one, other}) {
+            Level at = level(pivot);
+            if (at.through < k) {
+                low = std::move(at);
+            } else if (at.value < high.value) {
+                high = std::move(at);
+            }
+        }
+    }
+    return select_between(low, high, k, k).first;
 }
 
 template <class Int>
-Int OrderedSums<Int>::at(std::int64_t k) const {
-    const auto lists = static_cast<std::int64_t>(a_.size() + b_.size());
-    const std::int64_t few = std::max<std::int64_t>(20000, 2 * lists);
-    std::vector<Row> rows(a_.size());
-    for (std::size_t i = 0; i < rows.size(); ++i) {
-        rows[i] = {static_cast<std::uint32_t>(first_column(static_cast<std::int64_t>(i))),
-                   static_cast<std::uint32_t>(b_.size())};
+std::pair<typename OrderedSums<Int>::Place, typename OrderedSums<Int>::Place>
+OrderedSums<Int>::select(std::int64_t k, std::int64_t next) const {
+    if (size_ <= few_) {
+        return select_between(lowest(), highest(), k, next);
     }
-    // Invariant: the k-th smallest is among the candidates, `below` sums lie below all of them.
-    std::int64_t candidates = size_;
-    std::int64_t below = 0;
-    std::uint64_t seed = 1;
-    while (candidates > few) {
-        const std::vector<Int> sums = sample(rows, candidates, ++seed);
-        const double share = static_cast<double>(k - below) / static_cast<double>(candidates);
-        const auto centre = static_cast<std::int64_t>(share * sample_size);
-        const auto reach = static_cast<std::int64_t>(2.5 * std::sqrt(sample_size * share * (1 - share))) + 2;
-        const auto last = static_cast<std::int64_t>(sums.size()) - 1;
-        const Int low = sums[static_cast<std::size_t>(std::clamp<std::int64_t>(centre - reach, 0, last))];
-        const Int high = sums[static_cast<std::size_t>(std::clamp<std::int64_t>(centre + reach, 0, last))];
-        const std::int64_t below_low = count_below(low);
-        const std::int64_t through_low = count_at_most(low);
-        if (k > below_low && k <= through_low) {
-            return low;
-        }
-        if (k <= below_low) {
-            keep_at_most(rows, next_below(low));
-            candidates = below_low - below;
-            continue;
-        }
-        const std::int64_t through_high = count_at_most(high);
-        keep_above(rows, low);
-        if (k <= through_high) {
-            keep_at_most(rows, high);
-            candidates = through_high - through_low;
-        } else {
-            keep_above(rows, high);
-            candidates -= through_high - below;
-            below = through_high;
-            continue;
-        }
-        below = through_low;
-        // A bracket whose ends are neighbours holds one value many times.
-        if (next_above(low) == high) {
-            return high;
-        }
+    const auto [below, above] = guess(k, next);
+    Level low = level(below);
+    Level high = level(above);
+    if (low.through < k && next <= high.through && high.through - low.through <= few_) {
+        return select_between(low, high, k, next);
     }
-    return select_among(rows, candidates, k - below);
+    const auto settled = [&](std::int64_t one) {
+        Level bottom = low.through < one ? low : lowest();
+        Level top = low.through >= one ? low : high.through >= one ? high : highest();
+        return settle(std::move(bottom), std::move(top), one);
+    };
+    const Place place = settled(k);
+    return {place, next <= place.through ? place : settled(next)};
 }
 
 template class OrderedSums<std::int64_t>;

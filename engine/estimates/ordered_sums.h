@@ -1,10 +1,13 @@
 // Order statistics of all sums a[i] + b[j] of two sorted lists without writing the sums down (Johnson & Mizoguchi 1978;
-// Monahan 1984): counting is a walk along a staircase, selection narrows a bracket found from a sample.
+// Monahan 1984): counting is a walk along a staircase, selection narrows a bracket. The bracket comes from the same
+// question about every c-th member of both lists, which is so close that two walks are usually enough.
 // With a = x and b = -y these are the mn differences of two samples; with `triangle` only i <= j counts, and with
 // a = b = d they are the n(n+1)/2 sums whose halves are the Walsh averages.
 #pragma once
 
 #include <cstdint>
+#include <memory>
+#include <utility>
 #include <vector>
 
 namespace rankstead {
@@ -12,7 +15,14 @@ namespace rankstead {
 template <class Int>
 class OrderedSums {
 public:
-    // Both sorted ascending, not empty; `triangle` needs lists of equal length.
+    // An order statistic, and how many sums are below it and at most it.
+    struct Place {
+        Int value;
+        std::int64_t below = 0;
+        std::int64_t through = 0;
+    };
+
+    // Both sorted ascending, not empty; `triangle` needs equal lists.
     OrderedSums(std::vector<Int> a, std::vector<Int> b, bool triangle);
 
     // The differences x - y, from samples sorted ascending.
@@ -21,38 +31,43 @@ public:
     [[nodiscard]] static OrderedSums walsh(const std::vector<Int>& d);
     // The values themselves.
     [[nodiscard]] static OrderedSums values(const std::vector<Int>& d);
+    // The same sums with their signs turned; shares the lists.
+    [[nodiscard]] OrderedSums mirrored() const;
 
     [[nodiscard]] std::int64_t size() const { return size_; }
-    [[nodiscard]] Int at(std::int64_t k) const; // the k-th smallest, k = 1 to size()
-    [[nodiscard]] std::int64_t count_at_most(const Int& value) const;
-    [[nodiscard]] std::int64_t count_below(const Int& value) const;
-    [[nodiscard]] Int next_above(const Int& value) const; // the smallest sum above; needs one to exist
-    [[nodiscard]] Int next_below(const Int& value) const; // the largest sum below; needs one to exist
+    [[nodiscard]] Place place(std::int64_t k) const; // of the k-th smallest, k = 1 to size()
+    [[nodiscard]] Int at(std::int64_t k) const { return place(k).value; }
+    [[nodiscard]] std::pair<Int, Int> pair_at(std::int64_t k) const; // the k-th and the next
 
 private:
-    // For each i the candidates left are b[low..high).
-    struct Row {
-        std::uint32_t low = 0;
-        std::uint32_t high = 0;
+    using List = std::shared_ptr<const std::vector<Int>>;
+
+    // The sums at most a value: in row i those of the columns before ends[i].
+    struct Level {
+        Int value;
+        std::vector<std::uint32_t> ends;
+        std::int64_t through = 0;
     };
 
+    OrderedSums(List a, List b, bool triangle);
     [[nodiscard]] std::int64_t first_column(std::int64_t i) const { return triangle_ ? i : 0; }
-    [[nodiscard]] Int sum(std::int64_t i, std::int64_t j) const {
-        return a_[static_cast<std::size_t>(i)] + b_[static_cast<std::size_t>(j)];
-    }
-    // Walks the staircase: visit(i, end) with b[first_column(i)..end) the entries of row i that are "inside".
-    template <class Inside, class Visit>
-    void walk(Inside inside, Visit visit) const;
-    [[nodiscard]] std::vector<Int> sample(const std::vector<Row>& rows, std::int64_t candidates,
-                                          std::uint64_t seed) const;
-    [[nodiscard]] Int select_among(const std::vector<Row>& rows, std::int64_t candidates, std::int64_t k) const;
-    void keep_above(std::vector<Row>& rows, const Int& value) const;
-    void keep_at_most(std::vector<Row>& rows, const Int& value) const;
+    [[nodiscard]] Int sum(std::size_t i, std::size_t j) const { return Int((*a_)[i] + (*b_)[j]); }
+    [[nodiscard]] Level level(const Int& value) const;
+    [[nodiscard]] Level lowest() const;
+    [[nodiscard]] Level highest() const;
+    [[nodiscard]] std::pair<Int, Int> guess(std::int64_t k, std::int64_t next) const;
+    [[nodiscard]] std::pair<Int, Int> sampled_guess(const Level& low, const Level& high, std::int64_t k) const;
+    [[nodiscard]] std::pair<Place, Place> select(std::int64_t k, std::int64_t next) const;
+    [[nodiscard]] Place settle(Level low, Level high, std::int64_t k) const;
+    [[nodiscard]] std::pair<Place, Place> select_between(const Level& low, const Level& high, std::int64_t k,
+                                                         std::int64_t next) const;
 
-    std::vector<Int> a_;
-    std::vector<Int> b_;
+    List a_;
+    List b_;
     bool triangle_;
+    bool mirrored_ = false;
     std::int64_t size_;
+    std::int64_t few_; // as many sums may be written down
 };
 
 } // namespace rankstead

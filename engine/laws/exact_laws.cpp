@@ -2,32 +2,44 @@
 
 #include "binomial_coefficient.h"
 #include "inversion/certified_inversion.h"
+#include "low_end_law.h"
+#include "saddlepoint.h"
+#include "sign_law.h"
 
 #include <algorithm>
 #include <cmath>
+#include <limits>
 #include <numeric>
+#include <optional>
 
 namespace rankstead {
 
 namespace {
 
 // Below this the dynamic programme is taken without a look at the alternative.
-constexpr double quick_seconds = 0.013;
+constexpr double quick_signs = 0.0008;
+constexpr double quick_choices = 0.0025;
+// Variance of the number taken, m (N - m) / N, below which few frequencies are negligible: unbalanced samples.
+constexpr double least_spread_of_counts = 35;
 // Setting up an inversion: power sums and tilted weights, for each distinct score.
-constexpr double setup_seconds_per_score = 250e-9;
+constexpr double setup_seconds_per_score = 60e-9;
 
-Tails tails_of(const CertifiedTail& tail) {
+Tails tails_of(const CertifiedTail& tail, LawKind law) {
     Tails tails;
+    tails.law = law;
     tails.lower = tail.lower;
     tails.upper = std::min(1.0, 1 - tail.lower + tail.mass);
     // The upper tail is the larger one here, or both are near one half: its absolute error over one half.
-    tails.relative_error = std::max(tail.relative_error, 2 * (tail.relative_error * tail.lower + tail.mass_error));
+    tails.relative_error =
+        tail.lower < smallest_positive_p
+            ? std::numeric_limits<double>::infinity()
+            : std::max(tail.relative_error, 2 * (tail.relative_error * tail.lower + tail.mass_error));
     return tails;
 }
 
 std::optional<Tails> by_inversion(const CertifiedInversion& inversion, std::int64_t statistic, double seconds) {
     const auto tail = inversion.at(statistic, seconds);
-    return tail ? std::optional(tails_of(*tail)) : std::nullopt;
+    return tail ? std::optional(tails_of(*tail, LawKind::inverted)) : std::nullopt;
 }
 
 // The lowest sum there is: the ways to fill the last tie group that is not taken whole, out of all choices.
@@ -50,23 +62,137 @@ bool setup_fits(const ScoredItems& items, double seconds) {
     return setup_seconds_per_score * static_cast<double>(items.scores.size()) <= seconds;
 }
 
+// In the corners where the closed form has to multiply factor by factor.
+constexpr double seconds_for_closed_form = 0.01;
+constexpr std::int64_t most_listed = 4'000'000; // scores that are written down
+constexpr std::size_t least_closed = 130;       // values from which on frequencies are negligible without ties
+
+// Scores first, first + 1, ...: no ties.
+bool is_run(const std::vector<std::int64_t>& scores, std::int64_t first) {
+    return scores.back() - scores.front() + 1 == static_cast<std::int64_t>(scores.size()) && scores.front() == first &&
+           std::adjacent_find(scores.begin(), scores.end()) == scores.end();
+}
+
+std::optional<Tails> closed_form(const UntiedInversion& inversion, std::int64_t low, bool centred) {
+    const auto tail = inversion.at(low, seconds_for_closed_form);
+    if (!tail) {
+        return std::nullopt;
+    }
+    Tails tails = tails_of(*tail, LawKind::closed);
+    if (centred) {
+        tails.upper = tails.lower;
+    }
+    return tails;
+}
+
+// The statistic in the lower half of the law.
+std::optional<Tails> signed_rank_tails_at(const SignScores& scores, std::int64_t low, double seconds) {
+    const bool centred = low == scores.sum - low;
+    if (is_run(scores.scores, 1)) {
+        const auto n = static_cast<std::int64_t>(scores.scores.size());
+        if (auto tails = closed_form(UntiedInversion::of_signed_rank(n), low, centred)) {
+            return tails;
+        }
+    }
+    const ScoredItems items = ScoredItems::of(scores.scores);
+    if (!setup_fits(items, seconds)) {
+        return std::nullopt;
+    }
+    auto tails = by_inversion(CertifiedInversion::of_signs(items), low, seconds);
+    if (tails && centred) {
+        tails->upper = tails->lower;
+    }
+    return tails;
+}
+
+std::optional<Tails> closed_form(const CanonicalChoice& law) {
+    const ChoiceScores& scores = law.scores;
+    if (scores.scores.size() < least_closed || !is_run(scores.scores, 0)) {
+        return std::nullopt;
+    }
+    const auto rest = static_cast<std::int64_t>(scores.scores.size()) - scores.chosen;
+    const std::int64_t u = scores.statistic - scores.chosen * (scores.chosen - 1) / 2;
+    return closed_form(UntiedInversion::of_rank_sum(scores.chosen, rest), u, law.centred);
+}
+
+std::optional<Tails> by_inversion(const CanonicalChoice& law, double seconds) {
+    const ScoredItems items = ScoredItems::of(law.scores.scores);
+    if (!setup_fits(items, seconds) || items.scores.size() == 1) {
+        return std::nullopt;
+    }
+    auto tails = by_inversion(CertifiedInversion::of_choice(items, law.scores.chosen), law.scores.statistic, seconds);
+    if (tails && law.centred) {
+        tails->upper = tails->lower;
+    }
+    return tails;
+}
+
+// The smaller sample so small beside the other that few frequencies are negligible.
+bool is_unbalanced(const ChoiceScores& scores) {
+    const auto n = static_cast<double>(scores.scores.size());
+    const auto m = static_cast<double>(scores.chosen);
+    return m * (n - m) < least_spread_of_counts * n;
+}
+
+// One value against all others.
+std::optional<Tails> single_value_tails(const ChoiceScores& law) {
+    if (law.chosen != 1) {
+        return std::nullopt;
+    }
+    const auto [first, last] = std::equal_range(law.scores.begin(), law.scores.end(), law.statistic);
+    return from_counts({static_cast<std::uint64_t>(last - law.scores.begin()),
+                        static_cast<std::uint64_t>(law.scores.end() - first),
+                        static_cast<std::uint64_t>(law.scores.size())});
+}
+
+std::optional<Tails> rank_sum_tails_of(const CanonicalChoice& law, double seconds) {
+    if (law.scores.scores.front() == law.scores.scores.back()) {
+        return Tails(); // all equal: every choice has the same sum
+    }
+    if (auto tails = single_value_tails(law.scores)) {
+        return tails;
+    }
+    const double by_programme = rank_sum_cost(law.scores);
+    const auto programme = [&] { return rank_sum_tails(law.scores); };
+    if (by_programme <= std::min(quick_choices, seconds)) {
+        return programme();
+    }
+    if (auto tails = closed_form(law)) {
+        return tails;
+    }
+    if (by_programme <= seconds && is_unbalanced(law.scores)) {
+        return programme();
+    }
+    const double at_low_end = low_end_seconds(law.scores);
+    if (at_low_end <= std::min(quick_choices, seconds)) {
+        if (auto tails = low_end_tails(law.scores)) {
+            return tails;
+        }
+    }
+    if (auto tails = by_inversion(law, std::min({seconds, by_programme, at_low_end}))) {
+        return tails;
+    }
+    if (std::min(by_programme, at_low_end) <= seconds) {
+        const auto tails = at_low_end < by_programme ? low_end_tails(law.scores) : std::nullopt;
+        return tails || by_programme > seconds ? tails : programme();
+    }
+    return lowest_sum_tails(law.scores);
+}
+
 } // namespace
 
 Tails exact_signed_rank_tails(const SignScores& scores, double seconds) {
+    if (!scores.scores.empty() && scores.scores.front() == scores.scores.back()) {
+        return sign_tails(static_cast<std::int64_t>(scores.scores.size()), scores.statistic / scores.scores.front());
+    }
     const double by_programme = signed_rank_cost(scores);
-    if (by_programme <= std::min(quick_seconds, seconds)) {
+    if (by_programme <= std::min(quick_signs, seconds)) {
         return signed_rank_tails(scores);
     }
-    const bool above = 2 * scores.statistic > scores.sum;
-    const ScoredItems items = ScoredItems::of(scores.scores);
-    if (setup_fits(items, seconds)) {
-        const std::int64_t low = above ? scores.sum - scores.statistic : scores.statistic;
-        if (auto tails = by_inversion(CertifiedInversion::of_signs(items), low, seconds)) {
-            if (2 * low == scores.sum) {
-                tails->upper = tails->lower;
-            }
-            return above ? tails->swapped() : *tails;
-        }
+    const bool above = scores.statistic > scores.sum - scores.statistic;
+    const std::int64_t low = above ? scores.sum - scores.statistic : scores.statistic;
+    if (const auto tails = signed_rank_tails_at(scores, low, std::min(seconds, by_programme))) {
+        return above ? tails->swapped() : *tails;
     }
     if (by_programme > seconds) {
         throw LawTooLong();
@@ -75,28 +201,49 @@ Tails exact_signed_rank_tails(const SignScores& scores, double seconds) {
 }
 
 Tails exact_rank_sum_tails(const ChoiceScores& scores, double seconds) {
-    const double by_programme = rank_sum_cost(scores);
-    if (by_programme <= std::min(quick_seconds, seconds)) {
-        return rank_sum_tails(scores);
-    }
     const CanonicalChoice law = canonical(scores);
-    const ScoredItems items = ScoredItems::of(law.scores.scores);
-    if (setup_fits(items, seconds) && items.scores.size() > 1) {
-        const auto inversion = CertifiedInversion::of_choice(items, law.scores.chosen);
-        if (auto tails = by_inversion(inversion, law.scores.statistic, seconds)) {
-            if (law.centred) {
-                tails->upper = tails->lower;
-            }
-            return law.swaps ? tails->swapped() : *tails;
-        }
+    const auto tails = rank_sum_tails_of(law, seconds);
+    if (!tails) {
+        throw LawTooLong();
     }
-    if (by_programme <= seconds) {
-        return rank_sum_tails(scores);
+    return law.swaps ? tails->swapped() : *tails;
+}
+
+Tails untied_signed_rank_tails(std::int64_t n, std::int64_t low, const UntiedInversion& inversion) {
+    if (const auto tails = closed_form(inversion, low, false)) {
+        return *tails;
     }
-    if (const auto tails = lowest_sum_tails(law.scores)) {
-        return law.swaps ? tails->swapped() : *tails;
+    if (n > most_listed) {
+        throw LawTooLong();
     }
-    throw LawTooLong();
+    return exact_signed_rank_tails(untied_sign_scores(n, low), seconds_for_a_gap);
+}
+
+Tails untied_rank_sum_tails(std::int64_t first, std::int64_t second, std::int64_t low,
+                            const UntiedInversion& inversion) {
+    if (const auto tails = closed_form(inversion, low, false)) {
+        return *tails;
+    }
+    if (first + second > most_listed) {
+        throw LawTooLong();
+    }
+    return exact_rank_sum_tails(untied_choice_scores(first, second, low), seconds_for_a_gap);
+}
+
+Tails best_signed_rank_tails(const SignScores& scores, double seconds) {
+    try {
+        return exact_signed_rank_tails(scores, seconds);
+    } catch (const LawTooLong&) {
+        return saddlepoint_tails(scores);
+    }
+}
+
+Tails best_rank_sum_tails(const ChoiceScores& scores, double seconds) {
+    try {
+        return exact_rank_sum_tails(scores, seconds);
+    } catch (const LawTooLong&) {
+        return saddlepoint_tails(scores);
+    }
 }
 
 } // namespace rankstead

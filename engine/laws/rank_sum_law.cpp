@@ -3,11 +3,14 @@
 #include "binomial_coefficient.h"
 #include "compensated_sum.h"
 #include "exact_laws.h"
+#include "inversion/untied_inversion.h"
+#include "saddlepoint.h"
 #include "split_up.h"
 
 #include <algorithm>
 #include <limits>
 #include <numeric>
+#include <optional>
 #include <variant>
 
 namespace rankstead {
@@ -51,7 +54,8 @@ CanonicalChoice canonical(const ChoiceScores& scores) {
         result = {complement(scores), true, false};
     }
     // Mean chosen * sum / n.
-    if (result.scores.statistic * n > result.scores.chosen * sum) {
+    if (static_cast<UInt128>(result.scores.statistic) * static_cast<UInt128>(n) >
+        static_cast<UInt128>(result.scores.chosen) * static_cast<UInt128>(sum)) {
         result = {reflected(result.scores), !result.swaps, false};
     }
     return result;
@@ -72,6 +76,7 @@ Tails summed(const ChoiceScores& scores) {
     tails.lower = (mass.below + mass.at) / total;
     tails.upper = 1 - mass.below / total;
     tails.relative_error = (static_cast<double>(n) + 12) * 0.5 * std::numeric_limits<double>::epsilon();
+    tails.law = LawKind::summed;
     return tails;
 }
 
@@ -146,11 +151,45 @@ std::vector<Count> gaussian_binomial(std::int64_t m, std::int64_t n, std::int64_
     return count;
 }
 
-constexpr double most_entries = 2.5e6; // 40 MB of 128-bit counts
+// The table costs two additions for each value of U in the lower half and each of the smaller sample.
+constexpr double most_additions = 4e6;
+constexpr std::int64_t most_partition_additions = 1'000'000;
 
 bool integers_suffice(std::int64_t first, std::int64_t second) {
-    return static_cast<double>(first) * static_cast<double>(second) / 2 <= most_entries &&
+    const double pairs = static_cast<double>(first) * static_cast<double>(second);
+    return pairs * static_cast<double>(std::min(first, second)) <= most_additions &&
            log2_choose(first + second, first) < 126;
+}
+
+// Near the low end: the arrangements with U = k are the partitions of k into at most m parts, of which none can exceed
+// the other sample as long as k does not (Andrews 1976). Empty where that does not hold or their number leaves the
+// range of a double.
+std::optional<Tails> partition_tails(std::int64_t m, std::int64_t n, std::int64_t u) {
+    constexpr double largest_count = 1000; // binary digits
+    if (u > n || m * u > most_partition_additions || log2_choose(m + n, m) > largest_count) {
+        return std::nullopt;
+    }
+    std::vector<double> count(static_cast<std::size_t>(u + 1), 0.0);
+    count[0] = 1;
+    for (std::int64_t part = 1; part <= std::min(m, u); ++part) {
+        for (std::int64_t k = part; k <= u; ++k) {
+            count[static_cast<std::size_t>(k)] += count[static_cast<std::size_t>(k - part)];
+        }
+    }
+    CompensatedSum below;
+    for (std::size_t k = 0; k + 1 < count.size(); ++k) {
+        below.add(count[k]);
+    }
+    CompensatedSum through = below;
+    through.add(count.back());
+    const double total = double_choose(m + n, m);
+    Tails tails;
+    tails.law = LawKind::summed;
+    tails.lower = through.value() / total;
+    tails.upper = 1 - below.value() / total;
+    tails.relative_error =
+        (static_cast<double>(m + std::min(m, u)) + 12) * 0.5 * std::numeric_limits<double>::epsilon();
+    return tails;
 }
 
 } // namespace
@@ -196,6 +235,8 @@ private:
 UntiedRankSumLaw::UntiedRankSumLaw(std::int64_t first, std::int64_t second) : first_(first), second_(second) {
     if (integers_suffice(first, second)) {
         cumulative_ = std::make_unique<Cumulative>(first, second, exact_choose(first + second, first).value());
+    } else {
+        inversion_ = std::make_unique<const UntiedInversion>(UntiedInversion::of_rank_sum(first, second));
     }
 }
 
@@ -203,14 +244,25 @@ UntiedRankSumLaw::~UntiedRankSumLaw() = default;
 
 Tails UntiedRankSumLaw::at(std::int64_t k) const {
     const std::int64_t pairs = first_ * second_;
-    const bool above = 2 * k > pairs;
+    const bool above = k > pairs - k;
     const std::int64_t low = above ? pairs - k : k;
-    Tails tails = cumulative_ ? cumulative_->at(static_cast<std::size_t>(low))
-                              : exact_rank_sum_tails(untied_choice_scores(first_, second_, low), seconds_for_a_gap);
-    if (2 * k == pairs) {
+    const auto partitions =
+        cumulative_ ? std::nullopt : partition_tails(std::min(first_, second_), std::max(first_, second_), low);
+    Tails tails = cumulative_  ? cumulative_->at(static_cast<std::size_t>(low))
+                  : partitions ? *partitions
+                               : untied_rank_sum_tails(first_, second_, low, *inversion_);
+    if (low == pairs - low) {
         tails.upper = tails.lower;
     }
     return above ? tails.swapped() : tails;
+}
+
+Tails UntiedRankSumLaw::best_at(std::int64_t k) const {
+    try {
+        return at(k);
+    } catch (const LawTooLong&) {
+        return saddlepoint_tails(UntiedLaw::rank_sum(first_, second_), k);
+    }
 }
 
 } // namespace rankstead

@@ -41,22 +41,28 @@ struct CanonicalChoice {
 // Both tails. Swapping the samples swaps the tails exactly.
 [[nodiscard]] Tails rank_sum_tails(const ChoiceScores& scores);
 
-// P(U <= k) for all k up to half the range, without ties: computed once where exact integers suffice, else for each k.
+class UntiedInversion;
+
+// Both tails at any statistic, without ties: counted once in exact integers while that is quick, else by inversion in
+// closed form.
 class UntiedRankSumLaw {
 public:
-    UntiedRankSumLaw(std::int64_t first, std::int64_t second);
+    UntiedRankSumLaw(std::int64_t first, std::int64_t second); // first * second below 2^62
     ~UntiedRankSumLaw();
     UntiedRankSumLaw(const UntiedRankSumLaw&) = delete;
     UntiedRankSumLaw& operator=(const UntiedRankSumLaw&) = delete;
 
     // Both tails at U = k, 0 <= k <= first * second. Throws LawTooLong.
     [[nodiscard]] Tails at(std::int64_t k) const;
+    // The same, from the saddlepoint approximation where the exact law would take too long.
+    [[nodiscard]] Tails best_at(std::int64_t k) const;
 
 private:
     class Cumulative;
     std::int64_t first_;
     std::int64_t second_;
     std::unique_ptr<Cumulative> cumulative_;
+    std::unique_ptr<const UntiedInversion> inversion_;
 };
 
 } // namespace rankstead

@@ -36,6 +36,7 @@ Tails by_incomplete_beta(std::int64_t n, std::int64_t above) {
     tails.upper = low > 0 ? 1 - cdf(law, static_cast<double>(low - 1)) : 1;
     // Boost.Math documents a few hundred epsilon for ibeta with large arguments.
     tails.relative_error = 1e-12;
+    tails.law = LawKind::binomial;
     if (2 * low == n) {
         tails.upper = tails.lower;
     }

@@ -6,6 +6,7 @@
 #include "tails.h"
 
 #include <cstdint>
+#include <memory>
 #include <vector>
 
 namespace rankstead {
@@ -27,18 +28,30 @@ struct SignScores {
 
 [[nodiscard]] Tails signed_rank_tails(const SignScores& scores);
 
-// P(T <= k) for all k up to half the range, without ties, computed once while that is quick, else for each k.
+class UntiedInversion;
+
+// Both tails at any statistic, without ties: one table for all of them while that is quick, else by inversion in closed
+// form.
 class UntiedSignedRankLaw {
 public:
-    explicit UntiedSignedRankLaw(std::int64_t n);
+    explicit UntiedSignedRankLaw(std::int64_t n); // 1 to 2e9
+    ~UntiedSignedRankLaw();
+    UntiedSignedRankLaw(const UntiedSignedRankLaw&) = delete;
+    UntiedSignedRankLaw& operator=(const UntiedSignedRankLaw&) = delete;
+
     // Both tails at T = k, 0 <= k <= n(n+1)/2. Throws LawTooLong.
     [[nodiscard]] Tails at(std::int64_t k) const;
+    // The same, from the saddlepoint approximation where the exact law would take too long.
+    [[nodiscard]] Tails best_at(std::int64_t k) const;
 
 private:
+    [[nodiscard]] Tails tabled(std::size_t low) const;
+
     std::int64_t n_;
     std::int64_t sum_;
-    std::vector<std::uint64_t> counted_; // cumulative counts, where 2^n fits
-    std::vector<double> summed_;         // else cumulative probabilities
+    std::vector<std::uint64_t> counted_; // cumulative counts up to half the range, while 2^n fits
+    std::vector<double> summed_;         // else cumulative probabilities, while that is quick
+    std::unique_ptr<const UntiedInversion> inversion_;
 };
 
 } // namespace rankstead

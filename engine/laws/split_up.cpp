@@ -6,8 +6,8 @@ namespace rankstead {
 
 namespace {
 
-constexpr double seconds_per_addition = 0.4e-9;
-constexpr double seconds_per_merge = 4e-9;
+constexpr double seconds_per_addition = 0.2e-9;
+constexpr double seconds_per_merge = 2e-9;
 constexpr double most_cells = 5.5e6; // 44 MB of 64-bit counts
 
 // Additions that a half needs: every score adds each row once, over what can have been reached by then. On average

@@ -19,11 +19,24 @@ struct Counts {
     std::uint64_t total = 1;
 };
 
+// How a law was found.
+enum class LawKind {
+    counted,     // arrangements in whole numbers
+    summed,      // dynamic programming in floating point
+    closed,      // inversion of a characteristic function known in closed form
+    inverted,    // inversion of the characteristic function of the scores observed
+    binomial,    // the binomial law
+    saddlepoint, // not exact: the saddlepoint approximation
+    normal,      // not exact: the normal approximation
+};
+
 struct Tails {
     double lower = 1;
     double upper = 1;
     std::optional<Counts> counts;
-    double relative_error = 0; // bound on the relative error of the smaller tail
+    // Bound on the relative error of the smaller tail; infinite for a tail below the range of a double.
+    double relative_error = 0;
+    LawKind law = LawKind::counted;
 
     [[nodiscard]] Tails swapped() const;
 };

@@ -4,8 +4,11 @@
 
 namespace rankstead {
 
-void take_exact(Outcome& outcome, const Tails& tails) {
-    outcome.exact = true;
+void take_tails(Outcome& outcome, const Tails& tails) {
+    outcome.law = tails.law;
+    outcome.exact = is_exact(tails.law);
+    outcome.observations.exact_wanted_but_too_long = !outcome.exact;
+    outcome.observations.approximation_error = outcome.exact ? 0 : tails.relative_error;
     outcome.p = p_value(tails, outcome.settings.side);
     outcome.relative_error = tails.relative_error;
     if (tails.counts) {
@@ -17,10 +20,15 @@ void take_exact(Outcome& outcome, const Tails& tails) {
 
 void take_approximate(Outcome& outcome, const Moments& moments) {
     outcome.exact = false;
-    outcome.relative_error.reset();
-    outcome.arrangements.clear();
+    outcome.law = LawKind::normal;
     outcome.p = normal_p(outcome.statistic, moments, outcome.settings.side);
     outcome.z = normal_deviate(outcome.statistic, moments, outcome.settings.side);
+}
+
+void take_laws(Outcome& outcome, const GapLaws& laws) {
+    Observations& seen = outcome.observations;
+    seen.limits_approximate = laws.error() > 0;
+    seen.approximation_error = std::max(seen.approximation_error, laws.error());
 }
 
 std::string chosen_name(const std::string& setting, const std::string& heading, const std::string& otherwise) {

@@ -5,35 +5,50 @@
 #include "../grid.h"
 #include "../laws/exact_laws.h"
 #include "../laws/normal_approximation.h"
+#include "../laws/saddlepoint.h"
 #include "../laws/tails.h"
 #include "../outcome.h"
 
 #include <algorithm>
 #include <cmath>
+#include <memory>
 #include <string>
 #include <vector>
 
 namespace rankstead {
 
-// Fills p, arrangements and accuracy from an exact law.
-void take_exact(Outcome& outcome, const Tails& tails);
+// Fills p, arrangements and accuracy from an exact law, or p from the saddlepoint approximation that took its place.
+void take_tails(Outcome& outcome, const Tails& tails);
 
 // Fills p and z from the normal approximation at outcome.statistic.
 void take_approximate(Outcome& outcome, const Moments& moments);
 
-// Runs `test(exact)`: exact unless the approximation was asked for, approximate if the exact laws would take too long.
-template <class TestRun>
-void exact_or_approximate(Outcome& outcome, TestRun&& test) {
-    if (outcome.settings.method != Method::approximate) {
-        try {
-            test(true);
-            return;
-        } catch (const LawTooLong&) {
-            outcome.observations.exact_wanted_but_too_long = true;
-        }
+// The laws that a pair of limits needs: exact, until one of them would take too long; saddlepoint approximations from
+// then on, which is remembered. Copies share what they remember.
+class GapLaws {
+public:
+    template <class Scores>
+    [[nodiscard]] Tails tails(const Scores& scores, Tails (*best)(const Scores&, double)) const {
+        return remembered(*error_ > 0 ? saddlepoint_tails(scores) : best(scores, seconds_for_a_gap));
     }
-    test(false);
-}
+    template <class Law>
+    [[nodiscard]] Tails at(const Law& law, std::int64_t k) const {
+        return remembered(law.best_at(k));
+    }
+    // The largest error that is to be expected of the approximations; 0 if all laws were exact.
+    [[nodiscard]] double error() const { return *error_; }
+
+private:
+    [[nodiscard]] Tails remembered(const Tails& tails) const {
+        *error_ = is_exact(tails.law) ? *error_ : std::max(*error_, tails.relative_error);
+        return tails;
+    }
+
+    std::shared_ptr<double> error_ = std::make_shared<double>(0);
+};
+
+// Notes whether the limits needed approximations.
+void take_laws(Outcome& outcome, const GapLaws& laws);
 
 // The name for sentences: the setting, else the heading, else `otherwise`.
 [[nodiscard]] std::string chosen_name(const std::string& setting, const std::string& heading,
@@ -52,23 +67,14 @@ template <class Int>
 }
 
 template <class Int>
-[[nodiscard]] std::vector<Int> times(const std::vector<Int>& values, int factor) {
-    std::vector<Int> result(values);
-    for (Int& value : result) {
-        value *= factor;
-    }
-    return result;
-}
-
-template <class Int>
 [[nodiscard]] bool has_equal_neighbours(const std::vector<Int>& sorted) {
     return std::adjacent_find(sorted.begin(), sorted.end()) != sorted.end();
 }
 
-// Where the gap just above the k-th smallest breakpoint lies.
+// The gap just above the k-th smallest breakpoint, which is `floor`; k = 0 is below all of them.
 template <class Int>
 struct GapPlace {
-    Int twice_middle;
+    Int floor;
     std::int64_t first = 0;
     std::int64_t last = 0;
 };
@@ -76,12 +82,10 @@ struct GapPlace {
 template <class Int>
 [[nodiscard]] GapPlace<Int> gap_above(const OrderedSums<Int>& breakpoints, std::int64_t k) {
     if (k == 0) {
-        return {Int(2 * breakpoints.at(1) - 2), 0, 0};
+        return {Int(breakpoints.at(1) - 1), 0, 0};
     }
-    const Int below = breakpoints.at(k);
-    const std::int64_t last = breakpoints.count_at_most(below);
-    const Int above = last == breakpoints.size() ? Int(below + 2) : breakpoints.next_above(below);
-    return {Int(below + above), breakpoints.count_below(below) + 1, last};
+    const auto place = breakpoints.place(k);
+    return {place.value, place.below + 1, place.through};
 }
 
 // A law that is the same in every gap: the statistic there is the number of breakpoints above.
@@ -97,27 +101,28 @@ template <class Int>
     if (size % 2 == 1) {
         return off_grid(breakpoints.at((size + 1) / 2), halvings, grid);
     }
-    return off_grid(Int(breakpoints.at(size / 2) + breakpoints.at(size / 2 + 1)), halvings + 1, grid);
+    const auto [low, high] = breakpoints.pair_at(size / 2);
+    return off_grid(Int(low + high), halvings + 1, grid);
 }
 
 // One inverted test: its breakpoints as they are and mirrored, with the tails in the gaps of each.
 template <class Int>
 struct Inversion {
     OrderedSums<Int> breakpoints;
-    GapTails tails;
+    GapLaw law;
     OrderedSums<Int> mirrored;
-    GapTails mirrored_tails;
-    double spread = 0; // standard deviation of the statistic without ties
+    GapLaw mirrored_law;
+    double spread = 0; // standard deviation of the statistic
     int halvings = 0;  // breakpoints are multiples of 2^-halvings on the grid
     double smallest_tail = 0;
 };
 
 template <class Int>
-[[nodiscard]] LowerLimit<Int> lower_limit(const OrderedSums<Int>& breakpoints, const GapTails& tails,
+[[nodiscard]] LowerLimit<Int> lower_limit(const OrderedSums<Int>& breakpoints, const GapLaw& law,
                                           const Settings& settings, double spread) {
     const Fraction rate = tail_rate(settings);
-    return settings.interval == IntervalRule::matching ? matching_lower_limit(breakpoints, tails, rate, spread)
-                                                       : table_lower_limit(breakpoints, tails, rate, spread);
+    return settings.interval == IntervalRule::matching ? matching_lower_limit(breakpoints, law, rate, spread)
+                                                       : table_lower_limit(breakpoints, law, rate, spread);
 }
 
 // Fills lower, upper and confidence.
@@ -138,11 +143,10 @@ void take_limits(Outcome& outcome, const Inversion<Int>& inversion, const Grid& 
     };
     outcome.lower = outcome.upper = Figure::none(other_side);
     if (settings.side != Side::lower) {
-        take(outcome.lower, lower_limit(inversion.breakpoints, inversion.tails, settings, inversion.spread), false);
+        take(outcome.lower, lower_limit(inversion.breakpoints, inversion.law, settings, inversion.spread), false);
     }
     if (settings.side != Side::higher) {
-        take(outcome.upper, lower_limit(inversion.mirrored, inversion.mirrored_tails, settings, inversion.spread),
-             true);
+        take(outcome.upper, lower_limit(inversion.mirrored, inversion.mirrored_law, settings, inversion.spread), true);
     }
     const std::string& reason = outcome.observations.interval_reason;
     const double missed = settings.side == Side::two_sided ? 2 * outside : outside;

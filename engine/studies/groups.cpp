@@ -1,6 +1,7 @@
 #include "../laws/binomial_coefficient.h"
 #include "../laws/normal_approximation.h"
 #include "../laws/rank_sum_law.h"
+#include "../laws/saddlepoint.h"
 #include "common.h"
 #include "fingerprint.h"
 #include "studies.h"
@@ -20,10 +21,11 @@ struct TwoSamples {
 };
 
 // The probability of the lowest or highest rank sum: the ways to fill the last tie group that is not taken whole.
-template <class Groups>
-double extreme_tail(const PooledRanking& ranking, const Groups& in_order) {
+template <class Iterator>
+double extreme_tail(const PooledRanking& ranking, Iterator begin, Iterator end) {
     std::int64_t wanted = ranking.first;
-    for (const PooledGroup& group : in_order) {
+    for (auto at = begin; at != end; ++at) {
+        const PooledGroup& group = *at;
         if (wanted <= group.count()) {
             const std::int64_t all = ranking.first + ranking.second;
             const auto ways = exact_choose(group.count(), wanted);
@@ -37,8 +39,9 @@ double extreme_tail(const PooledRanking& ranking, const Groups& in_order) {
 }
 
 double smallest_two_sided_p(const PooledRanking& ranking) {
-    const std::vector<PooledGroup> reversed(ranking.groups.rbegin(), ranking.groups.rend());
-    const double tail = std::min(extreme_tail(ranking, ranking.groups), extreme_tail(ranking, reversed));
+    const auto& groups = ranking.groups;
+    const double tail = std::min(extreme_tail(ranking, groups.begin(), groups.end()),
+                                 extreme_tail(ranking, groups.rbegin(), groups.rend()));
     return std::clamp(2 * tail, smallest_positive_p, 1.0);
 }
 
@@ -52,6 +55,11 @@ Moments untied_moments(std::int64_t first, std::int64_t second) {
     const auto n = static_cast<double>(second);
     return {m * n / 2, m * n * (m + n + 1) / 12};
 }
+
+// Up to so many values the exact law is as quick as its approximation; beyond the others, setting up either takes
+// longest.
+constexpr std::int64_t exact_is_quick = 110;
+constexpr std::int64_t setup_is_slow = 20'000;
 
 // In the gaps between differences only equal values within a sample tie, and U is the number of differences above.
 template <class Int>
@@ -68,40 +76,62 @@ public:
     }
 
     [[nodiscard]] Tails observed(const PooledRanking& ranking) const {
-        return untied_ ? law_->at(ranking.doubled_u() / 2)
-                       : exact_rank_sum_tails(choice_scores(ranking), seconds_for_p);
+        return untied_ ? law_->best_at(ranking.doubled_u() / 2)
+                       : best_rank_sum_tails(choice_scores(ranking), seconds_for_p);
     }
 
+    // The laws of the limits, as far as they have been asked for.
+    [[nodiscard]] const GapLaws& laws() const { return laws_; }
+
     [[nodiscard]] Inversion<Int> inversion() const {
-        Inversion<Int> result{
-            OrderedSums<Int>::differences(samples_.first, samples_.second), gap_tails(samples_.first, samples_.second),
-            OrderedSums<Int>::differences(samples_.second, samples_.first), gap_tails(samples_.second, samples_.first)};
-        result.spread = std::sqrt(untied_moments(first_, second_).variance);
-        result.smallest_tail = smallest_untied_tail(first_, second_);
+        const auto sums = OrderedSums<Int>::differences(samples_.first, samples_.second);
+        const auto mirrored = sums.mirrored();
+        Inversion<Int> result{sums, gap_law(samples_.first, samples_.second, sums), mirrored,
+                              gap_law(samples_.second, samples_.first, mirrored)};
+        result.spread = std::sqrt(gap_moments().variance);
+        result.smallest_tail = exact_ ? smallest_untied_tail(first_, second_) : result.law.tails(0).tails.upper;
         return result;
     }
 
 private:
     [[nodiscard]] bool one_law() const { return table_ || !tied_within_; }
 
-    [[nodiscard]] GapTails gap_tails(const std::vector<Int>& x, const std::vector<Int>& y) const {
+    // `sums` are the differences x - y; the samples must outlive the result.
+    [[nodiscard]] GapLaw gap_law(const std::vector<Int>& x, const std::vector<Int>& y,
+                                 const OrderedSums<Int>& sums) const {
         const std::int64_t pairs = first_ * second_;
         if (!exact_) {
-            const Moments moments = table_ ? untied_moments(first_, second_)
-                                           : rank_sum_moments(rank_pooled(x, y, Int(x.front() - y.back() - 1)));
-            return one_law_gaps(
-                pairs, [moments](std::int64_t above) { return normal_tails(static_cast<double>(above), moments); });
+            const Moments moments = gap_moments();
+            return {
+                one_law_gaps(
+                    pairs, [moments](std::int64_t above) { return normal_tails(static_cast<double>(above), moments); }),
+                {}};
         }
         if (one_law()) {
-            return one_law_gaps(pairs, [law = law_](std::int64_t above) { return law->at(above); });
+            return {
+                one_law_gaps(pairs, [law = law_, laws = laws_](std::int64_t above) { return laws.at(*law, above); }),
+                {}};
         }
-        return [sums = std::make_shared<const OrderedSums<Int>>(OrderedSums<Int>::differences(x, y)),
-                twice_x = times(x, 2), twice_y = times(y, 2)](std::int64_t k) {
-            const GapPlace<Int> gap = gap_above(*sums, k);
-            return Gap{
-                exact_rank_sum_tails(choice_scores(rank_pooled(twice_x, twice_y, gap.twice_middle)), seconds_for_a_gap),
-                gap.first, gap.last};
+        const auto by = [sums, &x, &y](auto tails) {
+            return [sums, &x, &y, tails](std::int64_t k) {
+                const GapPlace<Int> gap = gap_above(sums, k);
+                return Gap{tails(choice_scores(rank_pooled_in_gap(x, y, gap.floor))), gap.first, gap.last};
+            };
         };
+        GapLaw law{by([laws = laws_](const ChoiceScores& scores) { return laws.tails(scores, best_rank_sum_tails); }),
+                   {}};
+        if (first_ + second_ > exact_is_quick && first_ + second_ < setup_is_slow) {
+            law.rough = by([](const ChoiceScores& scores) { return saddlepoint_tails(scores); });
+        }
+        return law;
+    }
+
+    // The same in every gap: only equal values within a sample tie there.
+    [[nodiscard]] Moments gap_moments() const {
+        const auto& x = samples_.first;
+        const auto& y = samples_.second;
+        return table_ ? untied_moments(first_, second_)
+                      : rank_sum_moments(rank_pooled(x, y, Int(x.front() - y.back() - 1)));
     }
 
     const TwoSamples<Int>& samples_;
@@ -112,19 +142,22 @@ private:
     bool untied_;
     bool exact_;
     std::shared_ptr<const UntiedRankSumLaw> law_;
+    GapLaws laws_;
 };
 
 template <class Int>
-void rank_sum_test(Outcome& outcome, const TwoSamples<Int>& samples, const PooledRanking& ranking, bool exact) {
+void rank_sum_test(Outcome& outcome, const TwoSamples<Int>& samples, const PooledRanking& ranking) {
+    const bool exact = outcome.settings.method != Method::approximate;
     const RankSumPlan<Int> plan(outcome, samples, ranking, exact);
     if (exact) {
-        take_exact(outcome, plan.observed(ranking));
+        take_tails(outcome, plan.observed(ranking));
     } else {
         take_approximate(outcome, rank_sum_moments(ranking));
     }
     const Inversion<Int> inversion = plan.inversion();
     outcome.estimate = median_breakpoint(inversion.breakpoints, 0, samples.grid);
     take_limits(outcome, inversion, samples.grid);
+    take_laws(outcome, plan.laws());
 }
 
 template <class Int>
@@ -132,8 +165,9 @@ void rank_sum_study(Outcome& outcome, const TwoSamples<Int>& samples) {
     const PooledRanking ranking = rank_pooled(samples.first, samples.second, samples.margin);
     outcome.statistic = static_cast<double>(ranking.doubled_u()) / 2;
     outcome.tied = static_cast<std::size_t>(ranking.tied());
+    outcome.observations.all_tied = ranking.groups.size() == 1;
     outcome.smallest_p = smallest_two_sided_p(ranking);
-    exact_or_approximate(outcome, [&](bool exact) { rank_sum_test(outcome, samples, ranking, exact); });
+    rank_sum_test(outcome, samples, ranking);
 }
 
 template <class Int>
@@ -160,31 +194,33 @@ bool spreads_differ(const Sample& first, const Sample& second) {
 } // namespace
 
 Outcome run_groups(const Arguments& arguments, const Settings& settings) {
-    const Column first = read_column(*arguments[0], settings);
-    const Column second = read_column(*arguments[1], settings);
+    Column first = read_column(*arguments[0], settings);
+    Column second = read_column(*arguments[1], settings);
     Outcome outcome;
     outcome.study = StudyId::groups;
     outcome.settings = settings;
     outcome.ledgers = {first.ledger, second.ledger};
     outcome.n = first.values.size() + second.values.size();
+    outcome.fingerprint = Fingerprint().add(first).add(second).text();
     Grid grid;
     grid.cover(first.values);
     grid.cover(second.values);
     grid.cover(settings.margin);
+    require_practicable(grid, outcome.n);
     with_integers(grid, [&]<class Int>() {
-        TwoSamples<Int> samples{on_grid<Int>(first.values, grid), on_grid<Int>(second.values, grid),
-                                on_grid<Int>(settings.margin, grid), grid};
+        TwoSamples<Int> samples{moved_on_grid<Int>(std::move(first.values), grid),
+                                moved_on_grid<Int>(std::move(second.values), grid), on_grid<Int>(settings.margin, grid),
+                                grid};
         std::sort(samples.first.begin(), samples.first.end());
         std::sort(samples.second.begin(), samples.second.end());
-        outcome.first = {chosen_name(settings.first_name, first.heading, "first"), first.values.size(),
+        outcome.first = {chosen_name(settings.first_name, first.heading, "first"), samples.first.size(),
                          describe(samples.first, grid)};
-        outcome.second = {chosen_name(settings.second_name, second.heading, "second"), second.values.size(),
+        outcome.second = {chosen_name(settings.second_name, second.heading, "second"), samples.second.size(),
                           describe(samples.second, grid)};
         rank_sum_study(outcome, samples);
         take_superiority(outcome, samples);
     });
     outcome.observations.spreads_differ = spreads_differ(outcome.first, *outcome.second);
-    outcome.fingerprint = Fingerprint().add(first).add(second).text();
     return outcome;
 }
 

@@ -2,6 +2,7 @@
 
 #include "../laws/exact_laws.h"
 #include "../laws/normal_approximation.h"
+#include "../laws/saddlepoint.h"
 #include "../laws/sign_law.h"
 #include "../laws/signed_rank_law.h"
 #include "common.h"
@@ -36,12 +37,12 @@ void sign_test(Outcome& outcome, const OneSample<Int>& sample, const SignedRanki
         take_approximate(outcome, moments);
         in_gap = normal_gaps(all, sign_moments(all));
     } else {
-        take_exact(outcome, sign_tails(ranking.used, above));
+        take_tails(outcome, sign_tails(ranking.used, above));
     }
-    Inversion<Int> inversion{OrderedSums<Int>::values(sample.sorted), in_gap,
-                             OrderedSums<Int>::values(negated(sample.sorted)), in_gap};
+    const auto values = OrderedSums<Int>::values(sample.sorted);
+    Inversion<Int> inversion{values, {in_gap, {}}, values.mirrored(), {in_gap, {}}};
     inversion.spread = std::sqrt(static_cast<double>(all)) / 2;
-    inversion.smallest_tail = std::exp2(-static_cast<double>(all));
+    inversion.smallest_tail = in_gap(0).tails.upper;
     outcome.estimate = median_breakpoint(inversion.breakpoints, 0, sample.grid);
     take_limits(outcome, inversion, sample.grid);
 }
@@ -59,6 +60,11 @@ Moments untied_moments(std::int64_t n) {
     return {size * (size + 1) / 4, size * (size + 1) * (2 * size + 1) / 24};
 }
 
+// Up to so many values the exact law is as quick as its approximation; beyond the others, setting up either takes
+// longest.
+constexpr std::int64_t exact_is_quick = 120;
+constexpr std::int64_t setup_is_slow = 20'000;
+
 // The number of Walsh averages above the gap is T+ there, so a law that is the same in every gap needs no ranking.
 template <class Int>
 class SignedRankPlan {
@@ -74,13 +80,16 @@ public:
 
     [[nodiscard]] const SignScores& scores() const { return scores_; }
 
+    // The laws of the limits, as far as they have been asked for.
+    [[nodiscard]] const GapLaws& laws() const { return laws_; }
+
     [[nodiscard]] Inversion<Int> inversion() const {
-        const std::vector<Int> mirrored = negated(sorted_);
-        Inversion<Int> result{OrderedSums<Int>::walsh(sorted_), gap_tails(sorted_), OrderedSums<Int>::walsh(mirrored),
-                              gap_tails(mirrored)};
-        result.spread = std::sqrt(untied_moments(n_).variance);
+        const auto walsh = OrderedSums<Int>::walsh(sorted_);
+        const auto mirrored = walsh.mirrored();
+        Inversion<Int> result{walsh, gap_law(walsh, false), mirrored, gap_law(mirrored, true)};
+        result.spread = std::sqrt(moments().variance);
         result.halvings = 1;
-        result.smallest_tail = std::exp2(-static_cast<double>(n_));
+        result.smallest_tail = exact_ ? std::exp2(-static_cast<double>(n_)) : result.law.tails(0).tails.upper;
         return result;
     }
 
@@ -88,22 +97,32 @@ private:
     // Without equal values, and in the classical table, the law is the untied one in every gap.
     [[nodiscard]] bool one_law() const { return table_ || !tied_values_; }
 
-    [[nodiscard]] GapTails gap_tails(const std::vector<Int>& sorted) const {
+    // `sums` are those of the values, or of the values mirrored.
+    [[nodiscard]] GapLaw gap_law(const OrderedSums<Int>& sums, bool mirror) const {
         if (!exact_) {
-            return normal_gaps(walsh_, table_ ? untied_moments(n_) : gap_moments(sorted));
+            return {normal_gaps(walsh_, moments()), {}};
         }
         if (one_law()) {
-            return one_law_gaps(walsh_, [law = law_](std::int64_t above) { return law->at(above); });
+            return {
+                one_law_gaps(walsh_, [law = law_, laws = laws_](std::int64_t above) { return laws.at(*law, above); }),
+                {}};
         }
-        // A sum of two values is twice a margin, so twice the middle of two sums is four times one.
-        return [sums = std::make_shared<const OrderedSums<Int>>(OrderedSums<Int>::walsh(sorted)),
-                fourfold = times(sorted, 4)](std::int64_t k) {
-            const GapPlace<Int> gap = gap_above(*sums, k);
-            return Gap{
-                exact_signed_rank_tails(sign_scores(rank_signed(fourfold, gap.twice_middle, false)), seconds_for_a_gap),
-                gap.first, gap.last};
+        const auto shared = std::make_shared<const std::vector<Int>>(mirror ? negated(sorted_) : sorted_);
+        const auto by = [sums, shared](auto tails) {
+            return [sums, shared, tails](std::int64_t k) {
+                const GapPlace<Int> gap = gap_above(sums, k);
+                return Gap{tails(sign_scores(rank_signed_in_gap(*shared, gap.floor))), gap.first, gap.last};
+            };
         };
+        GapLaw law{by([laws = laws_](const SignScores& scores) { return laws.tails(scores, best_signed_rank_tails); }),
+                   {}};
+        if (n_ > exact_is_quick && n_ < setup_is_slow) {
+            law.rough = by([](const SignScores& scores) { return saddlepoint_tails(scores); });
+        }
+        return law;
     }
+
+    [[nodiscard]] Moments moments() const { return table_ ? untied_moments(n_) : gap_moments(sorted_); }
 
     const std::vector<Int>& sorted_;
     std::int64_t n_;
@@ -113,14 +132,25 @@ private:
     bool tied_values_;
     bool exact_;
     std::shared_ptr<const UntiedSignedRankLaw> law_;
+    GapLaws laws_;
 };
 
-// p at a margin, with the zeros it makes dropped.
+// p at a margin, with the zeros it makes dropped. Among many values an approximation within a factor of two decides
+// where p is not near the rate.
 template <class Int>
-double dropped_p(const OneSample<Int>& sample, const Int& margin, Side side, bool exact) {
+double dropped_p(const OneSample<Int>& sample, const Int& margin, const Settings& settings, const GapLaws& laws,
+                 double rate) {
     const SignedRanking ranking = rank_signed(sample.sorted, margin, false);
-    if (exact) {
-        return p_value(exact_signed_rank_tails(sign_scores(ranking), seconds_for_a_gap), side);
+    const Side side = settings.side;
+    if (settings.method != Method::approximate) {
+        const SignScores scores = sign_scores(ranking);
+        if (ranking.used > exact_is_quick) {
+            const double rough = p_value(saddlepoint_tails(scores), side);
+            if (rough > 2 * rate || rough < rate / 2) {
+                return rough;
+            }
+        }
+        return p_value(laws.tails(scores, best_signed_rank_tails), side);
     }
     return normal_p(static_cast<double>(ranking.doubled_positive_sum) / 2, signed_rank_moments(ranking), side);
 }
@@ -154,7 +184,7 @@ std::vector<std::size_t> indices_near_limits(const std::vector<Int>& values, con
 
 // Dropping a zero can turn p around at a margin equal to one of the values, and only there.
 template <class Int>
-std::vector<double> exceptional_margins(const Outcome& outcome, const OneSample<Int>& sample, bool exact) {
+std::vector<double> exceptional_margins(const Outcome& outcome, const OneSample<Int>& sample, const GapLaws& laws) {
     const double rate = error_rate(outcome.settings).value();
     std::vector<Int> values = sample.sorted;
     values.erase(std::unique(values.begin(), values.end()), values.end());
@@ -165,7 +195,7 @@ std::vector<double> exceptional_margins(const Outcome& outcome, const OneSample<
             (outcome.lower.value && at < *outcome.lower.value) || (outcome.upper.value && at > *outcome.upper.value);
         const bool on_limit =
             (outcome.lower.value && at == *outcome.lower.value) || (outcome.upper.value && at == *outcome.upper.value);
-        const bool rejected = dropped_p(sample, values[i], outcome.settings.side, exact) <= rate;
+        const bool rejected = dropped_p(sample, values[i], outcome.settings, laws, rate) <= rate;
         if (!on_limit && rejected != outside) {
             found.push_back(at);
         }
@@ -174,12 +204,13 @@ std::vector<double> exceptional_margins(const Outcome& outcome, const OneSample<
 }
 
 template <class Int>
-void signed_rank_test(Outcome& outcome, const OneSample<Int>& sample, const SignedRanking& ranking, bool exact) {
+void signed_rank_test(Outcome& outcome, const OneSample<Int>& sample, const SignedRanking& ranking) {
     const Settings& settings = outcome.settings;
+    const bool exact = settings.method != Method::approximate;
     const SignedRankPlan<Int> plan(outcome, sample, ranking, exact);
     outcome.statistic = static_cast<double>(ranking.doubled_positive_sum) / 2;
     if (exact) {
-        take_exact(outcome, exact_signed_rank_tails(plan.scores(), seconds_for_p));
+        take_tails(outcome, best_signed_rank_tails(plan.scores(), seconds_for_p));
     } else {
         take_approximate(outcome, signed_rank_moments(ranking));
     }
@@ -187,8 +218,9 @@ void signed_rank_test(Outcome& outcome, const OneSample<Int>& sample, const Sign
     outcome.estimate = median_breakpoint(inversion.breakpoints, 1, sample.grid);
     take_limits(outcome, inversion, sample.grid);
     if (settings.zeros == Zeros::drop && settings.interval == IntervalRule::matching) {
-        outcome.observations.exceptional_margins = exceptional_margins(outcome, sample, exact);
+        outcome.observations.exceptional_margins = exceptional_margins(outcome, sample, plan.laws());
     }
+    take_laws(outcome, plan.laws());
 }
 
 // ------------------------------------------------------------------------------------------------ both
@@ -207,9 +239,9 @@ bool is_lopsided(const OneSample<Int>& sample) {
 
 template <class Int>
 void take_chance_of_rise(Outcome& outcome, const OneSample<Int>& sample) {
-    const SignedRanking ranking = rank_signed(sample.sorted, sample.reference, false);
+    const auto [level, rises] = std::equal_range(sample.sorted.begin(), sample.sorted.end(), sample.reference);
     const auto n = static_cast<double>(sample.sorted.size());
-    const double successes = static_cast<double>(ranking.positives()) + static_cast<double>(ranking.zeros) / 2;
+    const double successes = static_cast<double>(sample.sorted.end() - rises) + static_cast<double>(rises - level) / 2;
     take_chance(outcome, successes / n, clopper_pearson_interval(successes, n, tail_rate(outcome.settings).value()),
                 "");
 }
@@ -229,7 +261,7 @@ void analyse_one_sample(Outcome& outcome, const OneSample<Int>& sample) {
     if (sign) {
         sign_test(outcome, sample, ranking);
     } else {
-        exact_or_approximate(outcome, [&](bool exact) { signed_rank_test(outcome, sample, ranking, exact); });
+        signed_rank_test(outcome, sample, ranking);
         outcome.observations.lopsided = is_lopsided(sample);
     }
     take_chance_of_rise(outcome, sample);

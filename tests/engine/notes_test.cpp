@@ -68,6 +68,27 @@ TEST(Notes, all_values_of_both_groups_equal) {
     EXPECT_EQ(all.find("So few values"), std::string::npos) << all;
 }
 
+TEST(Notes, all_values_of_both_groups_equal_once_the_margin_is_taken_off) {
+    const std::string all = joined(test::groups({7, 7, 7, 7}, {5, 5, 5, 5}, "margin=2"));
+    EXPECT_NE(
+        all.find("All values are equal once the margin is taken off, so the groups cannot be told apart: p is 1."),
+        std::string::npos)
+        << all;
+}
+
+// Equal as they stand, but the margin lowers all of the first group below the second.
+TEST(Notes, equal_values_that_the_margin_parts) {
+    const Outcome outcome = test::groups({5, 5, 5, 5}, {5, 5, 5, 5}, "margin=2");
+    EXPECT_NE(outcome.p, 1);
+    EXPECT_EQ(joined(outcome).find("All values are equal"), std::string::npos);
+}
+
+// Equal quartiles and medians, every value tied, yet not one tie group.
+TEST(Notes, values_that_are_tied_in_more_than_one_group) {
+    const Outcome outcome = test::groups({1, 1, 5, 5, 5, 5, 5, 5}, {5, 5, 5, 5});
+    EXPECT_EQ(joined(outcome).find("All values are equal"), std::string::npos);
+}
+
 // 3 v 3: the smallest two-sided p is 2/20.
 TEST(Notes, too_few_values_for_a_p_below_0_05) {
     expect_only(test::groups({1, 3, 5}, {2, 4, 6}, "level=0.9"),
@@ -97,9 +118,21 @@ TEST(Notes, limits_at_a_level_that_exists_need_no_note) {
 TEST(Notes, exact_law_too_long) {
     Outcome outcome = quiet_groups();
     outcome.observations.exact_wanted_but_too_long = true;
+    outcome.observations.approximation_error = 0.001;
     expect_only(outcome,
-                "The exact law of so many values would take too long, so p and the limits come from the normal "
-                "approximation. With this many values it is close, except for very small p.");
+                "The exact law of so many values would take too long, so p and the limits come from the saddlepoint "
+                "approximation. Wherever it was compared with the exact p, it was within 0.1% of it for p above "
+                "0.0001.");
+}
+
+TEST(Notes, exact_laws_of_the_limits_too_long) {
+    Outcome outcome = quiet_groups();
+    outcome.observations.limits_approximate = true;
+    outcome.observations.approximation_error = 2;
+    expect_only(outcome,
+                "The exact law of so many values would take too long, so the limits come, unlike p, from the "
+                "saddlepoint approximation. With so few values in the smaller group, or on so few different ones, it "
+                "may be off by a factor of two or three.");
 }
 
 TEST(Notes, approximation_asked_for) {

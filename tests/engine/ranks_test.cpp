@@ -8,6 +8,8 @@
 #include <gtest/gtest.h>
 
 #include <cstdlib>
+#include <iterator>
+#include <set>
 
 namespace rankstead {
 namespace {
@@ -79,6 +81,58 @@ TEST(RankSigned, agrees_with_ranking_one_by_one) {
         for (const bool rank_zeros : {false, true}) {
             EXPECT_EQ(rank_signed(sorted, origin, rank_zeros).doubled_positive_sum,
                       plain_doubled_positive_sum(shifted(sorted, origin), rank_zeros));
+        }
+    }
+}
+
+// A gap between sums of two values, or differences, is where everything is ranked as at its middle: here with all
+// values fourfold, or twofold, so that the middle is a whole number.
+TEST(RankSignedInGap, ranks_as_at_a_margin_in_the_middle_of_the_gap) {
+    test::Random random(44);
+    for (int i = 0; i < 200; ++i) {
+        const Values sorted = random.sorted(random.whole(1, 9), -6, 6);
+        Values fourfold;
+        std::set<std::int64_t> sums{2 * sorted.front() - 2, 2 * sorted.back() + 2};
+        for (const std::int64_t d : sorted) {
+            fourfold.push_back(4 * d);
+            for (const std::int64_t e : sorted) {
+                sums.insert(d + e);
+            }
+        }
+        for (auto floor = sums.begin(); std::next(floor) != sums.end(); ++floor) {
+            const auto ranking = rank_signed_in_gap(sorted, *floor);
+            const auto middle = rank_signed(fourfold, *floor + *std::next(floor), false);
+            ASSERT_EQ(ranking.doubled_positive_sum, middle.doubled_positive_sum) << "above " << *floor;
+            ASSERT_EQ(ranking.groups.size(), middle.groups.size());
+            ASSERT_EQ(ranking.tied(), middle.tied());
+            ASSERT_EQ(ranking.zeros, 0);
+        }
+    }
+}
+
+TEST(RankPooledInGap, ranks_as_at_a_shift_in_the_middle_of_the_gap) {
+    test::Random random(45);
+    for (int i = 0; i < 200; ++i) {
+        const Values x = random.sorted(random.whole(1, 9), -6, 6);
+        const Values y = random.sorted(random.whole(1, 9), -6, 6);
+        Values twofold_x;
+        Values twofold_y;
+        std::set<std::int64_t> differences{x.front() - y.back() - 1, x.back() - y.front() + 1};
+        for (const std::int64_t b : y) {
+            twofold_y.push_back(2 * b);
+        }
+        for (const std::int64_t a : x) {
+            twofold_x.push_back(2 * a);
+            for (const std::int64_t b : y) {
+                differences.insert(a - b);
+            }
+        }
+        for (auto floor = differences.begin(); std::next(floor) != differences.end(); ++floor) {
+            const auto ranking = rank_pooled_in_gap(x, y, *floor);
+            const auto middle = rank_pooled(twofold_x, twofold_y, *floor + *std::next(floor));
+            ASSERT_EQ(ranking.doubled_u(), middle.doubled_u()) << "above " << *floor;
+            ASSERT_EQ(ranking.groups.size(), middle.groups.size());
+            ASSERT_EQ(ranking.tied(), middle.tied());
         }
     }
 }

@@ -149,6 +149,28 @@ TEST(Sentence, uses_the_decimal_sign_asked_for) {
     EXPECT_NE(words.find("is 3,5 (95% confidence interval 1 to 6); p = 0,03,"), std::string::npos) << words;
 }
 
+TEST(LawWords, name_how_the_law_was_found) {
+    Outcome outcome = test::groups({1, 3}, {2, 4});
+    EXPECT_EQ(law_words(outcome), ", by counting arrangements");
+    outcome.law = LawKind::summed;
+    EXPECT_EQ(law_words(outcome), ", by dynamic programming");
+    outcome.law = LawKind::closed;
+    EXPECT_EQ(law_words(outcome), ", by inversion of the closed characteristic function");
+    outcome.law = LawKind::inverted;
+    EXPECT_EQ(law_words(outcome), ", by inversion of the characteristic function");
+    outcome.law = LawKind::binomial;
+    EXPECT_EQ(law_words(outcome), ", by the binomial law");
+    outcome.law = LawKind::normal;
+    EXPECT_EQ(law_words(outcome), "");
+}
+
+TEST(MethodWords, name_the_saddlepoint_approximation) {
+    Outcome outcome = test::groups({1, 3}, {2, 4});
+    outcome.exact = false;
+    outcome.law = LawKind::saddlepoint;
+    EXPECT_EQ(method_words(outcome), "saddlepoint approximation with lattice correction");
+}
+
 TEST(MethodWords, of_an_exact_p) {
     EXPECT_EQ(method_words(test::groups({1, 3}, {2, 4})), "exact");
     EXPECT_EQ(method_words(test::groups({1, 3}, {3, 4})), "exact, conditional on the ties");

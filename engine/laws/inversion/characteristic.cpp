@@ -3,14 +3,14 @@
 #include "../compensated_sum.h"
 
 #include <algorithm>
+#include <array>
 #include <cmath>
 
 namespace rankstead {
 
 namespace {
 
-__extension__ typedef __int128 Wide;
-
+constexpr double many = 50'000;
 constexpr double farthest_reach = 0.62; // of the series' radius
 constexpr double farthest_truncation = 1e-13;
 
@@ -34,8 +34,9 @@ std::vector<double> offsets_of(const ScoredItems& items, bool centred) {
 } // namespace
 
 Characteristic::Characteristic(ScoredItems items, double p, bool centred)
-    : items_(std::move(items)), size_(static_cast<double>(items_.size())), series_(p, terms),
-      offsets_(offsets_of(items_, centred)), moment_(terms + 1, 0.0), absolute_moment_(terms + 1, 0.0) {
+    : items_(std::move(items)), size_(static_cast<double>(items_.size())), terms_(size_ > many ? 32 : 72),
+      series_(p, static_cast<int>(terms_)), offsets_(offsets_of(items_, centred)), moment_(terms_ + 1, 0.0),
+      absolute_moment_(terms_ + 1, 0.0) {
     for (const double offset : offsets_) {
         largest_ = std::max(largest_, std::fabs(offset));
     }
@@ -43,39 +44,50 @@ Characteristic::Characteristic(ScoredItems items, double p, bool centred)
     if (centred) {
         moment_[1] = 0; // by definition
     }
-    for (int k = 0; k <= terms; ++k) {
-        choose_.emplace_back(static_cast<std::size_t>(k + 1), 1.0);
-        for (std::size_t l = 1; l < static_cast<std::size_t>(k); ++l) {
-            choose_.back()[l] =
-                choose_[static_cast<std::size_t>(k - 1)][l - 1] + choose_[static_cast<std::size_t>(k - 1)][l];
+    for (std::size_t k = 0; k <= terms_; ++k) {
+        choose_.emplace_back(k + 1, 1.0);
+        for (std::size_t l = 1; l < k; ++l) {
+            choose_.back()[l] = choose_[k - 1][l - 1] + choose_[k - 1][l];
         }
     }
 }
 
 void Characteristic::sum_powers() {
+    constexpr std::size_t lanes = 8; // so many groups at a time, so that no multiplication waits for another
     constexpr std::size_t block = 32;
-    std::vector<CompensatedSum> sums(terms + 1);
-    std::vector<CompensatedSum> absolute(terms + 1);
-    std::vector<double> partial(terms + 1);
-    std::vector<double> absolute_partial(terms + 1);
+    std::vector<CompensatedSum> sums(terms_ + 1);
+    std::vector<CompensatedSum> absolute(terms_ + 1);
+    std::vector<double> partial(terms_ + 1);
+    std::vector<double> absolute_partial(terms_ + 1);
     for (std::size_t begin = 0; begin < offsets_.size(); begin += block) {
         std::fill(partial.begin(), partial.end(), 0.0);
         std::fill(absolute_partial.begin(), absolute_partial.end(), 0.0);
-        for (std::size_t g = begin; g < std::min(begin + block, offsets_.size()); ++g) {
-            const double x = offsets_[g] / largest_;
-            double power = static_cast<double>(items_.counts[g]);
-            for (std::size_t l = 0; l <= terms; ++l) {
-                partial[l] += power;
-                absolute_partial[l] += std::fabs(power);
-                power *= x;
+        const std::size_t end = std::min(begin + block, offsets_.size());
+        for (std::size_t g = begin; g < end; g += lanes) {
+            std::array<double, lanes> x{};
+            std::array<double, lanes> power{};
+            for (std::size_t lane = 0; lane < std::min(lanes, end - g); ++lane) {
+                x[lane] = offsets_[g + lane] / largest_;
+                power[lane] = static_cast<double>(items_.counts[g + lane]);
+            }
+            for (std::size_t l = 0; l <= terms_; ++l) {
+                double sum = 0;
+                double size = 0;
+                for (std::size_t lane = 0; lane < lanes; ++lane) {
+                    sum += power[lane];
+                    size += std::fabs(power[lane]);
+                    power[lane] *= x[lane];
+                }
+                partial[l] += sum;
+                absolute_partial[l] += size;
             }
         }
-        for (std::size_t l = 0; l <= terms; ++l) {
+        for (std::size_t l = 0; l <= terms_; ++l) {
             sums[l].add(partial[l]);
             absolute[l].add(absolute_partial[l]);
         }
     }
-    for (std::size_t l = 0; l <= terms; ++l) {
+    for (std::size_t l = 0; l <= terms_; ++l) {
         moment_[l] = sums[l].value();
         absolute_moment_[l] = absolute[l].value();
     }
@@ -96,13 +108,13 @@ Jet Characteristic::jet(double a, double b, bool by_series) const {
 Jet Characteristic::series_jet(double a, double b) const {
     Jet jet;
     const double x = b * largest_;
-    std::vector<double> a_power(terms + 1, 1.0);
-    std::vector<double> x_power(terms + 1, 1.0);
-    for (std::size_t k = 1; k <= terms; ++k) {
+    std::vector<double> a_power(terms_ + 1, 1.0);
+    std::vector<double> x_power(terms_ + 1, 1.0);
+    for (std::size_t k = 1; k <= terms_; ++k) {
         a_power[k] = a_power[k - 1] * a;
         x_power[k] = x_power[k - 1] * x;
     }
-    for (std::size_t k = 2; k <= terms; ++k) {
+    for (std::size_t k = 2; k <= terms_; ++k) {
         for (std::size_t l = 0; l <= k; ++l) {
             const std::size_t j = k - l;
             const double common = series_.c[k] * choose_[k][l] * moment_[l];
@@ -160,15 +172,15 @@ Characteristic::Row Characteristic::row(Complex b, bool count_free) const {
     const Complex x = b * largest_;
     const double size = std::abs(x);
     Row row;
-    const std::size_t last = count_free ? terms : 0;
+    const std::size_t last = count_free ? terms_ : 0;
     row.coefficients.assign(last + 1, 0.0);
     row.errors.assign(last + 1, 0.0);
     Complex power = 1;
     double absolute_power = 1;
-    for (std::size_t l = 0; l <= terms; ++l) {
+    for (std::size_t l = 0; l <= terms_; ++l) {
         const Complex factor = power * moment_[l];
         const double absolute_factor = absolute_power * absolute_moment_[l] * unit_roundoff;
-        for (std::size_t j = 0; j <= std::min(last, terms - l); ++j) {
+        for (std::size_t j = 0; j <= std::min(last, terms_ - l); ++j) {
             row.coefficients[j] += series_.c[j + l] * choose_[j + l][l] * factor;
             row.errors[j] += operations(j + l) * series_.size[j + l] * choose_[j + l][l] * absolute_factor;
         }

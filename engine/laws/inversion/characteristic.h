@@ -6,11 +6,12 @@
 // Rounding. u is half the machine epsilon. In the series a term of degree k passes through at most 8k + 64 roundings of
 // its own size (offsets and their powers 4l, complex powers 3l, Horner 4j, binomial k, blocks of 32 and the rest 64),
 // so its error is at most (8k + 64) u times the sum of the absolute terms (Higham 2002, section 3.1). In a product a
-// factor q + p e^y is off by at most 20u absolutely, 20u/|factor| relatively, and each complex multiplication by 3u
-// more (Brent, Percival & Zimmermann 2007: sqrt(5) u).
+// factor q + p e^y is off by at most 80u absolutely (60 of them for its phase, see group_phases.h), 80u/|factor|
+// relatively, and each complex multiplication by 3u more (Brent, Percival & Zimmermann 2007: sqrt(5) u).
 #pragma once
 
 #include "bernoulli_series.h"
+#include "contour_parts.h"
 #include "scored_items.h"
 
 #include <complex>
@@ -19,8 +20,6 @@
 #include <vector>
 
 namespace rankstead {
-
-using Complex = std::complex<double>;
 
 // T and its derivatives at a real point, with a bound on the error of the value.
 struct Jet {
@@ -68,9 +67,9 @@ private:
     [[nodiscard]] Jet series_jet(double a, double b) const;
     [[nodiscard]] Jet summed_jet(double a, double b) const;
 
-    static constexpr int terms = 72;
     ScoredItems items_;
     double size_;
+    std::size_t terms_; // the arguments that matter are the smaller, the more items there are
     BernoulliSeries series_;
     std::vector<double> offsets_;
     double largest_ = 0;

@@ -13,6 +13,9 @@ namespace {
 
 constexpr double pi = std::numbers::pi;
 constexpr std::int64_t largest_transform = std::int64_t{1} << 21;
+constexpr double seconds_per_angle = 25e-9;
+constexpr double seconds_per_transformed = 150e-9;
+constexpr double seconds_per_group = 4e-9;
 constexpr double rounding_slack = 1e-6; // of the weights: far above the rounding of sums and transform
 
 // The weighted sum of squares about the mean of each block of neighbouring groups whose scores span at most `range`.
@@ -44,6 +47,23 @@ bool blocks_prove(const std::vector<std::int64_t>& scores, const std::vector<dou
     return 2 / (pi * pi) * low * low * variance_within_blocks(scores, weights, pi / high) >= need;
 }
 
+// Every so-manieth group, where there are very many: a part of the groups proves as well, if it proves enough.
+struct Thinned {
+    Thinned(const std::vector<std::int64_t>& all_scores, const std::vector<double>& all_weights) {
+        constexpr std::size_t enough = 16384;
+        const std::size_t stride = std::max<std::size_t>(1, all_scores.size() / enough);
+        is_less = stride > 1;
+        for (std::size_t g = 0; g < all_scores.size(); g += stride) {
+            scores.push_back(all_scores[g]);
+            weights.push_back(all_weights[g]);
+        }
+    }
+
+    std::vector<std::int64_t> scores;
+    std::vector<double> weights;
+    bool is_less = false;
+};
+
 struct Window {
     std::size_t begin = 0;
     std::size_t end = 0; // past the last group
@@ -51,8 +71,10 @@ struct Window {
     std::int64_t range = 0;
 };
 
-// The window of groups with at least the weight `wanted` that spans the fewest scores; all groups if there is none.
-Window narrowest_window(const std::vector<std::int64_t>& scores, const std::vector<double>& weights, double wanted) {
+// The window of at least so many groups with at least the weight `wanted` that spans the fewest scores; all groups if
+// there is none. Of few groups the transform has many peaks.
+Window narrowest_window(const std::vector<std::int64_t>& scores, const std::vector<double>& weights, double wanted,
+                        std::size_t groups) {
     double total = 0;
     for (const double weight : weights) {
         total += weight;
@@ -62,84 +84,144 @@ Window narrowest_window(const std::vector<std::int64_t>& scores, const std::vect
     std::size_t begin = 0;
     for (std::size_t end = 0; end < scores.size(); ++end) {
         weight += weights[end];
-        while (weight - weights[begin] >= wanted) {
+        while (weight - weights[begin] >= wanted && end - begin >= groups) {
             weight -= weights[begin];
             ++begin;
         }
         const std::int64_t range = scores[end] - scores[begin];
-        if (weight >= wanted && range < best.range) {
+        if (weight >= wanted && end + 1 - begin >= groups && range < best.range) {
             best = {begin, end + 1, weight, range};
         }
     }
     return best;
 }
 
-// The cells of the transform that are not proven, as ranges of t.
-std::vector<FrequencyRange> unproven_cells(const std::vector<std::int64_t>& scores, const std::vector<double>& weights,
-                                           const Window& window, double need, double from) {
+void add_range(std::vector<FrequencyRange>& ranges, const FrequencyRange& range) {
+    if (!ranges.empty() && ranges.back().high >= range.low) {
+        ranges.back().high = std::max(ranges.back().high, range.high);
+    } else {
+        ranges.push_back(range);
+    }
+}
+
+// Sum of the weights times the distances of their scores from the middle of the window: |C| changes no faster.
+double steepest(const std::vector<std::int64_t>& scores, const std::vector<double>& weights, const Window& window) {
+    const double middle = static_cast<double>(window.range) / 2;
+    double slope = 0;
+    for (std::size_t g = window.begin; g < window.end; ++g) {
+        slope += weights[g] * std::fabs(static_cast<double>(scores[g] - scores[window.begin]) - middle);
+    }
+    return slope;
+}
+
+// Step by step, each as long as the last look proves: for a window of few groups over many scores.
+Screened swept_ranges(const std::vector<std::int64_t>& scores, const std::vector<double>& weights, const Window& window,
+                      const Need& need, double from, double seconds_allowed) {
+    const double slope = steepest(scores, weights, window);
+    const double shortest = 0.25 / static_cast<double>(window.range + 1);
+    const double seconds_per_step = seconds_per_angle * static_cast<double>(window.end - window.begin);
+    Screened result;
+    std::vector<FrequencyRange>& ranges = result.ranges;
+    for (double t = from; t < pi;) {
+        result.seconds += seconds_per_step;
+        if (result.seconds > seconds_allowed) {
+            add_range(ranges, {t, pi});
+            break;
+        }
+        std::complex<double> transform = 0;
+        for (std::size_t g = window.begin; g < window.end; ++g) {
+            const double angle = t * static_cast<double>(scores[g] - scores[window.begin]);
+            transform += weights[g] * std::complex<double>(std::cos(angle), std::sin(angle));
+        }
+        const double spare = window.weight * (1 - rounding_slack) - std::abs(transform) - need.at(t);
+        const double proven = slope > 0 ? spare / slope : spare > 0 ? pi : 0;
+        if (proven < shortest) {
+            add_range(ranges, {t, std::min(pi, t + shortest)});
+        }
+        t += std::max(proven, shortest);
+    }
+    return result;
+}
+
+// From one Fourier transform: for a window of many groups. The cells that are not proven, as ranges of t.
+Screened transformed_ranges(const std::vector<std::int64_t>& scores, const std::vector<double>& weights,
+                            const Window& window, const Need& need, double from) {
     const auto size = std::bit_ceil(static_cast<std::uint64_t>(std::max<std::int64_t>(512, 8 * (window.range + 1))));
     std::vector<std::complex<double>> transform(size, 0.0);
-    const std::int64_t centre = scores[window.begin] + window.range / 2;
-    double lipschitz = 0;
     for (std::size_t g = window.begin; g < window.end; ++g) {
         transform[static_cast<std::size_t>(scores[g] - scores[window.begin])] += weights[g];
-        lipschitz += weights[g] * std::fabs(static_cast<double>(scores[g] - centre));
     }
     fourier_transform(transform);
     const double half_cell = pi / static_cast<double>(size);
-    const double provable = window.weight * (1 - rounding_slack) - need - half_cell * lipschitz;
-    std::vector<FrequencyRange> ranges;
+    const double provable = window.weight * (1 - rounding_slack) - half_cell * steepest(scores, weights, window);
+    Screened result{{}, seconds_per_transformed * static_cast<double>(size)};
     for (std::size_t k = 0; k <= size / 2; ++k) {
         const double t = 2 * half_cell * static_cast<double>(k);
         const FrequencyRange cell{std::max(from, t - half_cell), std::min(pi, t + half_cell)};
-        if (cell.high < from || std::abs(transform[k]) <= provable) {
+        if (cell.high < from || std::abs(transform[k]) <= provable - need.at(cell.low)) {
             continue;
         }
-        if (!ranges.empty() && ranges.back().high >= cell.low) {
-            ranges.back().high = cell.high;
-        } else {
-            ranges.push_back(cell);
-        }
+        add_range(result.ranges, cell);
     }
-    return ranges;
+    return result;
+}
+
+Screened unproven_ranges(const std::vector<std::int64_t>& scores, const std::vector<double>& weights,
+                         const Window& window, const Need& need, double from, double seconds_allowed) {
+    constexpr std::size_t few = 24;
+    if (window.weight * (1 - rounding_slack) <= need.at(pi)) {
+        return {{{from, pi}}, 0}; // too little weight to prove anything
+    }
+    const bool sweep = window.end - window.begin <= few || 8 * window.range > largest_transform;
+    return sweep ? swept_ranges(scores, weights, window, need, from, seconds_allowed)
+                 : transformed_ranges(scores, weights, window, need, from);
 }
 
 } // namespace
 
-std::optional<std::vector<FrequencyRange>> frequencies_that_matter(const std::vector<std::int64_t>& scores,
-                                                                   const std::vector<double>& weights, double need) {
+double Need::at(double t) const {
+    const double below = -std::expm1(-lambda);
+    const double rise = 2 * std::sin(t / 2) / below;
+    return base - 0.5 * std::log1p(std::exp(-lambda) * rise * rise);
+}
+
+Screened frequencies_that_matter(const std::vector<std::int64_t>& scores, const std::vector<double>& weights,
+                                 const Need& need, double seconds_allowed) {
     const double range = static_cast<double>(scores.back() - scores.front());
     if (range <= 0) {
-        return std::vector<FrequencyRange>{{0, pi}};
+        return {{{0, pi}}, 0};
     }
     // From here on blocks serve, step by step, until they no longer do.
     const double variance = variance_within_blocks(scores, weights, range);
-    const double first = std::sqrt(need / variance) * pi / std::sqrt(2.0);
-    double proven_to = first;
-    if (first < pi / range) {
-        proven_to = pi / range;
-    }
+    const double first = std::sqrt(need.base / variance) * pi / std::sqrt(2.0);
+    Screened result{{{0, std::min(first, pi)}}, 0};
+    const Thinned thinned(scores, weights);
+    double proven_to = first < pi / range ? pi / range : first;
     constexpr double step = 1.3;
-    while (proven_to < pi && blocks_prove(scores, weights, proven_to, std::min(pi, proven_to * step), need)) {
-        proven_to = std::min(pi, proven_to * step);
+    while (proven_to < pi) {
+        const double next = std::min(pi, proven_to * step);
+        const double needed = need.at(proven_to);
+        result.seconds += seconds_per_group * static_cast<double>(thinned.scores.size());
+        if (!blocks_prove(thinned.scores, thinned.weights, proven_to, next, needed)) {
+            result.seconds += seconds_per_group * static_cast<double>(scores.size());
+            if (!thinned.is_less || !blocks_prove(scores, weights, proven_to, next, needed)) {
+                break;
+            }
+        }
+        proven_to = next;
     }
-    std::vector<FrequencyRange> ranges{{0, std::min(first, pi)}};
     if (proven_to >= pi) {
-        return ranges;
+        return result;
     }
     constexpr double ample = 5;
-    const Window window = narrowest_window(scores, weights, ample * need);
-    if (8 * window.range > largest_transform) {
-        return std::nullopt;
+    constexpr std::size_t enough = 8;
+    const Window window = narrowest_window(scores, weights, ample * need.at(proven_to), enough);
+    const Screened rest = unproven_ranges(scores, weights, window, need, proven_to, seconds_allowed - result.seconds);
+    for (const FrequencyRange& cell : rest.ranges) {
+        add_range(result.ranges, cell);
     }
-    for (const FrequencyRange& cell : unproven_cells(scores, weights, window, need, proven_to)) {
-        if (ranges.back().high >= cell.low) {
-            ranges.back().high = std::max(ranges.back().high, cell.high);
-        } else {
-            ranges.push_back(cell);
-        }
-    }
-    return ranges;
+    result.seconds += rest.seconds;
+    return result;
 }
 
 } // namespace rankstead

@@ -4,13 +4,13 @@
 // V - |C(t)|, V the sum of the weights and C their Fourier transform. Any subset of the groups bounds it from below.
 //   - within blocks of neighbouring groups of range at most pi / t:  1 - cos x >= 2 x^2 / pi^2, hence
 //     V - |C(t)| >= (2 / pi^2) t^2 * (the weighted variance within the blocks, times their weights);
-//   - elsewhere by a Fourier transform of the weights in a window of scores, with the Lipschitz constant of C between
-//     its points.
+//   - elsewhere by the Fourier transform of the weights in a window of scores, at once or step by step, with the
+//     Lipschitz constant of C between its points.
 // What neither proves negligible is returned and must be evaluated, so that the peaks which ties cause are not missed.
 #pragma once
 
 #include <cstdint>
-#include <optional>
+#include <limits>
 #include <vector>
 
 namespace rankstead {
@@ -20,9 +20,25 @@ struct FrequencyRange {
     double high = 0;
 };
 
-// Ranges of t in [0, pi], ascending, outside of which V - |C(t)| >= need. Empty optional where the transform would be
-// too large.
-[[nodiscard]] std::optional<std::vector<FrequencyRange>>
-frequencies_that_matter(const std::vector<std::int64_t>& scores, const std::vector<double>& weights, double need);
+// How much decay makes a frequency negligible: the same everywhere, or less where the factor
+//     (1 - e^-lambda) / (1 - e^-(lambda - it)),
+// which turns masses into their sum, is small itself: the further from 0, the less.
+struct Need {
+    double base = 0;
+    double lambda = std::numeric_limits<double>::infinity();
+
+    [[nodiscard]] double at(double t) const;
+};
+
+// Ranges of t in [0, pi], ascending, outside of which V - |C(t)| >= need, and the work done, as counted.
+struct Screened {
+    std::vector<FrequencyRange> ranges;
+    double seconds = 0;
+};
+
+// What is not looked into within the work allowed counts as a range.
+[[nodiscard]] Screened frequencies_that_matter(const std::vector<std::int64_t>& scores,
+                                               const std::vector<double>& weights, const Need& need,
+                                               double seconds_allowed);
 
 } // namespace rankstead

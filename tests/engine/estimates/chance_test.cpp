@@ -162,8 +162,8 @@ TEST(NewcombeInterval, of_separated_samples_reaches_the_end_of_the_scale) {
 // The limits are not in the paper: as recomputed for P15 in tests/reference/published.json.
 TEST(NewcombeInterval, published_ct_ratings) {
     PooledRanking ranking;
-    const Values abnormal{3, 2, 2, 11, 33};
-    const Values normal{33, 6, 6, 11, 2};
+    const std::vector<std::int32_t> abnormal{3, 2, 2, 11, 33};
+    const std::vector<std::int32_t> normal{33, 6, 6, 11, 2};
     std::int64_t below = 0;
     for (std::size_t rating = 0; rating < 5; ++rating) {
         const std::int64_t count = abnormal[rating] + normal[rating];

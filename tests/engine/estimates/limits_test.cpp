@@ -7,6 +7,7 @@
 
 #include <algorithm>
 #include <array>
+#include <cmath>
 
 namespace rankstead {
 namespace {
@@ -30,8 +31,8 @@ struct Ladder {
         // The gap lies above all the equal breakpoints, so its law is that of the last of them.
         return {from_counts({total, upper_counts[static_cast<std::size_t>(last)], total}), first, last};
     }
-    [[nodiscard]] GapTails gaps() const {
-        return [this](std::int64_t k) { return at(k); };
+    [[nodiscard]] GapLaw gaps() const {
+        return {[this](std::int64_t k) { return at(k); }, {}};
     }
 };
 
@@ -72,7 +73,7 @@ TEST(FirstGapInside, is_what_a_scan_of_all_gaps_finds_from_every_guess) {
         const Fraction rate{random.whole(1, 500), 1000};
         for (std::int64_t guess = -2; guess <= last + 2; ++guess) {
             for (const double spread : {0.0, 10.0, 500.0}) {
-                const std::int64_t k = first_gap_inside(ladder.gaps(), last, rate, guess, spread);
+                const std::int64_t k = first_gap_inside(ladder.gaps(), last, rate, guess, spread).k;
                 ASSERT_EQ(ladder.at(k).first, ladder.at(scanned(ladder, rate)).first)
                     << "guess " << guess << ", spread " << spread;
             }
@@ -80,18 +81,59 @@ TEST(FirstGapInside, is_what_a_scan_of_all_gaps_finds_from_every_guess) {
     }
 }
 
+// A million gaps whose tails rise like a normal law's, the first inside being the one that is asked for.
+struct NormalGaps {
+    static constexpr std::int64_t last = 1'000'000;
+    static constexpr double spread = 6400;
+    std::int64_t first;
+    int asked = 0;
+
+    GapTails tails() {
+        return [this](std::int64_t k) {
+            ++asked;
+            Gap gap{{}, k, k};
+            // Phi(-1.959964) = 0.025 (Abramowitz & Stegun 1964, table 26.1), half a gap before the first inside.
+            const double deviate = 1.959964 - (static_cast<double>(k - first) + 0.5) / spread;
+            gap.tails.upper = std::erfc(deviate / std::sqrt(2.0)) / 2;
+            return gap;
+        };
+    }
+};
+
 TEST(FirstGapInside, asks_for_few_of_many_gaps) {
-    constexpr std::int64_t last = 1'000'000;
-    constexpr std::int64_t wanted = 480'000;
+    for (const std::int64_t guess : {400'000, 470'000, 479'000, 520'000}) {
+        NormalGaps gaps{480'000};
+        EXPECT_EQ(first_gap_inside({gaps.tails(), {}}, NormalGaps::last, {1, 40}, guess, NormalGaps::spread).k,
+                  480'000);
+        EXPECT_LE(gaps.asked, 8) << guess;
+    }
+}
+
+// A law that leaps from 0 to 1 leads the search astray; halving the bracket ends it.
+TEST(FirstGapInside, halves_the_bracket_where_the_law_is_nothing_like_a_normal_one) {
     int asked = 0;
     const GapTails tails = [&](std::int64_t k) {
         ++asked;
         Gap gap{{}, k, k};
-        gap.tails.upper = k < wanted ? 0.0 : 1.0;
+        gap.tails.upper = k < 480'000 ? 0.0 : 1.0;
         return gap;
     };
-    EXPECT_EQ(first_gap_inside(tails, last, {1, 40}, 479'000, 6400.0), wanted);
-    EXPECT_LE(asked, 20);
+    EXPECT_EQ(first_gap_inside({tails, {}}, NormalGaps::last, {1, 40}, 479'000, 6400.0).k, 480'000);
+    EXPECT_LE(asked, 30);
+}
+
+// The rough law is three gaps off; the exact one corrects it.
+TEST(FirstGapInside, asks_the_exact_law_only_around_what_the_rough_one_finds) {
+    for (const std::int64_t off : {-3, 0, 3}) {
+        NormalGaps exact{480'000};
+        NormalGaps rough{480'000 + off};
+        const FirstInside found =
+            first_gap_inside({exact.tails(), rough.tails()}, NormalGaps::last, {1, 40}, 470'000, NormalGaps::spread);
+        EXPECT_EQ(found.k, 480'000);
+        EXPECT_EQ(found.outside->upper, exact.tails()(479'999).tails.upper);
+        EXPECT_LE(exact.asked, 4); // one of them just above
+        EXPECT_GE(rough.asked, 2);
+    }
 }
 
 // Standard normal 2.5% point 1.959964 (Abramowitz & Stegun 1964): 50 - 1.959964 * 10 - 0.5 = 29.9, upwards 30.
@@ -130,10 +172,11 @@ TEST(MatchingLowerLimit, does_not_exist_where_even_the_lowest_gap_is_inside) {
 
 TEST(TableLowerLimit, is_the_order_statistic_of_the_critical_number) {
     // The law without ties, so every k stands for itself: P0(S <= 0) = 1/20, P0(S <= 1) = 2/20, P0(S <= 2) = 4/20.
-    const GapTails untied = [](std::int64_t k) {
-        constexpr std::array<std::uint64_t, 5> counts{1, 2, 4, 8, 20};
-        return Gap{from_counts({20, counts[static_cast<std::size_t>(k)], 20}), k, k};
-    };
+    const GapLaw untied{[](std::int64_t k) {
+                            constexpr std::array<std::uint64_t, 5> counts{1, 2, 4, 8, 20};
+                            return Gap{from_counts({20, counts[static_cast<std::size_t>(k)], 20}), k, k};
+                        },
+                        {}};
     const auto sums = OrderedSums<std::int64_t>::values({10, 20, 20, 30});
     const auto limit = table_lower_limit(sums, untied, {2, 20}, 1.0);
     EXPECT_EQ(limit.value, 20); // the third would need 4/20

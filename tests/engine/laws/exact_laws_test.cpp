@@ -64,8 +64,32 @@ TEST(ExactLaws, near_the_end_of_the_range_are_right_or_give_up) {
 }
 
 TEST(ExactLaws, give_up_where_the_time_allowed_is_too_short) {
-    EXPECT_THROW(static_cast<void>(exact_signed_rank_tails(untied_sign_scores(3000, 2100000), 1e-9)), LawTooLong);
-    EXPECT_THROW(static_cast<void>(exact_rank_sum_tails(untied_choice_scores(700, 900, 300000), 1e-9)), LawTooLong);
+    test::Random random(34);
+    const SignScores signs = sign_scores(rank_signed(random.sorted(3000, -50, 60), std::int64_t{0}, false));
+    EXPECT_THROW(static_cast<void>(exact_signed_rank_tails(signs, 1e-9)), LawTooLong);
+    const ChoiceScores choice =
+        choice_scores(rank_pooled(random.sorted(700, 0, 50), random.sorted(900, 0, 50), std::int64_t{0}));
+    EXPECT_THROW(static_cast<void>(exact_rank_sum_tails(choice, 1e-9)), LawTooLong);
+}
+
+TEST(BestLaws, are_the_saddlepoint_approximation_where_the_time_allowed_is_too_short) {
+    test::Random random(35);
+    const ChoiceScores choice =
+        choice_scores(rank_pooled(random.sorted(700, 0, 50), random.sorted(900, 0, 50), std::int64_t{0}));
+    EXPECT_EQ(best_rank_sum_tails(choice, 1e-9).law, LawKind::saddlepoint);
+    EXPECT_EQ(best_rank_sum_tails(choice, 0.5).law, LawKind::inverted);
+    const SignScores signs = sign_scores(rank_signed(random.sorted(3000, -50, 60), std::int64_t{0}, false));
+    EXPECT_EQ(best_signed_rank_tails(signs, 1e-9).law, LawKind::saddlepoint);
+    EXPECT_EQ(best_signed_rank_tails(signs, 0.5).law, LawKind::inverted);
+}
+
+// One value is the lowest of N with probability 1/N, whatever N is.
+TEST(ExactLaws, count_the_place_of_a_single_value_among_a_million) {
+    ChoiceScores scores = untied_choice_scores(1, 1'000'000, 2);
+    scores.scores[1] = 2; // a tie
+    const Tails tails = exact_rank_sum_tails(scores, 0.1);
+    EXPECT_EQ(tails.lower, 3.0 / 1'000'001);
+    EXPECT_EQ(tails.counts->upper, 1'000'000U);
 }
 
 } // namespace

@@ -10,7 +10,7 @@ using Values = std::vector<std::int64_t>;
 
 TEST(TakeExact, writes_arrangements_as_counts) {
     Outcome outcome;
-    take_exact(outcome, from_counts({43, 1000, 1024}));
+    take_tails(outcome, from_counts({43, 1000, 1024}));
     EXPECT_EQ(outcome.arrangements, "86 of 1,024");
     EXPECT_EQ(outcome.p, 86.0 / 1024);
     EXPECT_TRUE(outcome.exact);
@@ -18,7 +18,7 @@ TEST(TakeExact, writes_arrangements_as_counts) {
 
 TEST(TakeExact, has_no_arrangements_where_nothing_was_counted) {
     Outcome outcome;
-    take_exact(outcome, Tails{0.25, 0.8, std::nullopt, 1e-14});
+    take_tails(outcome, Tails{0.25, 0.8, std::nullopt, 1e-14});
     EXPECT_EQ(outcome.arrangements, "");
     EXPECT_EQ(outcome.p, 0.5);
     EXPECT_EQ(outcome.relative_error, 1e-14);
@@ -66,19 +66,20 @@ TEST(HasEqualNeighbours, sees_a_tie) {
     EXPECT_FALSE(has_equal_neighbours(Values{1}));
 }
 
-TEST(GapAbove, lies_between_different_breakpoints) {
+TEST(GapAbove, is_the_same_for_equal_breakpoints) {
     const auto sums = OrderedSums<std::int64_t>::values({10, 20, 20, 31});
-    EXPECT_EQ(gap_above(sums, 1).twice_middle, 30);
-    EXPECT_EQ(gap_above(sums, 2).twice_middle, 51);
+    EXPECT_EQ(gap_above(sums, 1).floor, 10);
+    EXPECT_EQ(gap_above(sums, 2).floor, 20);
     EXPECT_EQ(gap_above(sums, 2).first, 2);
     EXPECT_EQ(gap_above(sums, 2).last, 3);
-    EXPECT_EQ(gap_above(sums, 3).twice_middle, 51);
+    EXPECT_EQ(gap_above(sums, 3).floor, 20);
+    EXPECT_EQ(gap_above(sums, 4).floor, 31);
 }
 
-TEST(GapAbove, lies_below_the_lowest_and_above_the_highest_breakpoint) {
-    const auto sums = OrderedSums<std::int64_t>::values({10, 20});
-    EXPECT_LT(gap_above(sums, 0).twice_middle, 20);
-    EXPECT_GT(gap_above(sums, 2).twice_middle, 40);
+TEST(GapAbove, begins_below_the_lowest_breakpoint) {
+    const auto gap = gap_above(OrderedSums<std::int64_t>::values({10, 20}), 0);
+    EXPECT_LT(gap.floor, 10);
+    EXPECT_EQ(gap.last, 0);
 }
 
 TEST(MedianBreakpoint, is_the_mean_of_the_two_in_the_middle) {

@@ -151,11 +151,21 @@ TEST(Groups, approximate_p_comes_from_the_deviate) {
     EXPECT_FALSE(outcome.relative_error);
 }
 
-TEST(Groups, fall_back_to_the_approximation_where_the_exact_law_would_take_too_long) {
+TEST(Groups, are_exact_with_ninety_thousand_a_side_with_their_limits) {
     test::Random random(75);
-    const Outcome outcome = test::groups(random.numbers(90000, 0, 1000000000), random.numbers(90000, 0, 990000000));
+    const Outcome outcome = test::groups(random.numbers(90000, 0, 100000), random.numbers(90000, 0, 99900));
+    EXPECT_TRUE(outcome.exact);
+    EXPECT_LE(outcome.relative_error.value(), 1e-10);
+    EXPECT_FALSE(outcome.observations.limits_approximate);
+}
+
+TEST(Groups, fall_back_to_the_saddlepoint_where_the_exact_law_would_take_too_long) {
+    test::Random random(75);
+    const Outcome outcome = test::groups(random.numbers(20, 0, 1000), random.numbers(60000, 0, 990));
     EXPECT_FALSE(outcome.exact);
+    EXPECT_EQ(outcome.law, LawKind::saddlepoint);
     EXPECT_TRUE(outcome.observations.exact_wanted_but_too_long);
+    EXPECT_TRUE(outcome.observations.limits_approximate);
     EXPECT_LE(*outcome.lower.value, outcome.estimate);
     EXPECT_GE(*outcome.upper.value, outcome.estimate);
 }

@@ -112,14 +112,21 @@ TEST(SignTest, approximate_p_comes_from_the_deviate) {
     EXPECT_NEAR(outcome.z.value(), 2.0 / 1.5, 1e-15); // (7 - 4.5 - 0.5) / (3 / 2)
 }
 
-TEST(SignedRankTest, falls_back_to_the_approximation_where_the_exact_law_would_take_too_long) {
+TEST(SignedRankTest, is_exact_with_a_hundred_and_fifty_thousand_differences) {
     test::Random random(64);
     const Outcome outcome = test::changes(random.numbers(150000, -900000000, 1000000000));
-    EXPECT_FALSE(outcome.exact);
-    EXPECT_TRUE(outcome.observations.exact_wanted_but_too_long);
-    EXPECT_TRUE(outcome.lower.value && outcome.upper.value);
+    EXPECT_TRUE(outcome.exact);
+    EXPECT_LE(outcome.relative_error.value(), 1e-10);
     EXPECT_LT(*outcome.lower.value, outcome.estimate);
     EXPECT_GT(*outcome.upper.value, outcome.estimate);
+}
+
+TEST(SignedRankTest, falls_back_to_the_saddlepoint_where_the_exact_law_would_take_too_long) {
+    test::Random random(65);
+    const Outcome outcome = test::changes(random.numbers(300000, -3, 3));
+    EXPECT_FALSE(outcome.exact);
+    EXPECT_EQ(outcome.law, LawKind::saddlepoint);
+    EXPECT_TRUE(outcome.observations.exact_wanted_but_too_long);
 }
 
 TEST(SignTest, is_exact_at_any_size) {

@@ -25,12 +25,11 @@ double decay(const std::vector<std::int64_t>& scores, const std::vector<double>&
 
 void expect_screen_is_right(const std::vector<std::int64_t>& scores, double weight, double need) {
     const std::vector<double> weights(scores.size(), weight);
-    const auto ranges = frequencies_that_matter(scores, weights, need);
-    ASSERT_TRUE(ranges);
+    const auto ranges = frequencies_that_matter(scores, weights, Need{need}, 1).ranges;
     constexpr int looks = 20000;
     for (int i = 0; i <= looks; ++i) {
         const double t = std::numbers::pi * i / looks;
-        const bool matters = std::any_of(ranges->begin(), ranges->end(), [&](const FrequencyRange& range) {
+        const bool matters = std::any_of(ranges.begin(), ranges.end(), [&](const FrequencyRange& range) {
             return range.low <= t && t <= range.high;
         });
         EXPECT_TRUE(matters || decay(scores, weights, t) >= need) << t;
@@ -53,9 +52,8 @@ TEST(FrequencyScreen, keeps_the_peak_of_scores_that_are_nearly_all_even) {
         scores.push_back(2 * i);
     }
     scores.push_back(1001);
-    const auto ranges = frequencies_that_matter(scores, std::vector<double>(scores.size(), 0.25), 40);
-    ASSERT_TRUE(ranges);
-    EXPECT_GE(ranges->back().high, std::numbers::pi - 1e-9);
+    const auto ranges = frequencies_that_matter(scores, std::vector<double>(scores.size(), 0.25), Need{40}, 1).ranges;
+    EXPECT_GE(ranges.back().high, std::numbers::pi - 1e-9);
     expect_screen_is_right(scores, 0.25, 40);
 }
 
@@ -64,10 +62,9 @@ TEST(FrequencyScreen, proves_everything_beyond_the_first_peak_for_many_consecuti
     for (std::size_t i = 0; i < scores.size(); ++i) {
         scores[i] = static_cast<std::int64_t>(i);
     }
-    const auto ranges = frequencies_that_matter(scores, std::vector<double>(scores.size(), 0.25), 45);
-    ASSERT_TRUE(ranges);
-    ASSERT_EQ(ranges->size(), 1U);
-    EXPECT_LT(ranges->front().high, 0.001);
+    const auto ranges = frequencies_that_matter(scores, std::vector<double>(scores.size(), 0.25), Need{45}, 1).ranges;
+    ASSERT_EQ(ranges.size(), 1U);
+    EXPECT_LT(ranges.front().high, 0.001);
 }
 
 } // namespace
