@@ -110,8 +110,8 @@ inline constexpr std::array setting_table{
         "aside (Pratt 1959).",
         one_sample_studies, apply_choice<&Settings::zeros>, show_choice<&Settings::zeros>},
     SettingRow{"method", "auto, exact, approximate", "auto",
-               "How p is obtained. auto and exact use the exact law while it takes less than half a second, then the "
-               "normal approximation, and say so; approximate always the normal approximation.",
+               "How p is obtained. auto and exact use the exact law; where that would take more than half a second, "
+               "the saddlepoint approximation, and say so. approximate always uses the normal approximation.",
                data_studies, apply_choice<&Settings::method>, show_choice<&Settings::method>},
     SettingRow{"interval", "matching, table", "matching",
                "matching gives limits that never contradict p; table the classical order statistics of the law without "

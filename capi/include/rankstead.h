@@ -208,7 +208,8 @@ RKS_API const char* rks_build(void);
  *   side    0 two-sided (twice the smaller tail, at most 1), 1 higher, -1 lower; tails include the statistic.
  *   p       receives the exact probability, up to rounding; NaN on failure.
  * Returns RKS_OK, RKS_BAD_CALL (null pointer, unknown side, a statistic outside its range or not a whole number),
- * RKS_NO_DATA (a sample size of 0), RKS_TOO_LARGE (the exact law would take longer than half a second).
+ * RKS_NO_DATA (a sample size of 0), RKS_TOO_LARGE (more than 1,000,000,000 values in a sample, or, in far corners, an
+ * exact law that would take longer than half a second).
  */
 
 /* T+, the rank sum of the positive differences, of n non-zero differences: 0 to n(n+1)/2. Since ABI 1. */

@@ -1,6 +1,7 @@
 #include "exact_laws.h"
 
 #include "binomial_coefficient.h"
+#include "few_levels_law.h"
 #include "inversion/certified_inversion.h"
 #include "low_end_law.h"
 #include "saddlepoint.h"
@@ -19,6 +20,7 @@ namespace {
 // Below this the dynamic programme is taken without a look at the alternative.
 constexpr double quick_signs = 0.0008;
 constexpr double quick_choices = 0.0025;
+constexpr double quick_levels = 0.005;
 // Variance of the number taken, m (N - m) / N, below which few frequencies are negligible: unbalanced samples.
 constexpr double least_spread_of_counts = 35;
 // Setting up an inversion: power sums and tilted weights, for each distinct score.
@@ -58,6 +60,12 @@ std::optional<Tails> lowest_sum_tails(const ChoiceScores& law) {
     return tails.relative_error <= 1e-10 ? std::optional(tails) : std::nullopt;
 }
 
+// At the centre of a symmetric law both tails are equal.
+Tails centred(Tails tails, bool at_centre) {
+    tails.upper = at_centre ? tails.lower : tails.upper;
+    return tails;
+}
+
 bool setup_fits(const ScoredItems& items, double seconds) {
     return setup_seconds_per_score * static_cast<double>(items.scores.size()) <= seconds;
 }
@@ -85,6 +93,33 @@ std::optional<Tails> closed_form(const UntiedInversion& inversion, std::int64_t 
     return tails;
 }
 
+// On few levels, within the time allowed.
+template <class MakeLaw>
+std::optional<Tails> by_levels(const ScoredItems& items, const MakeLaw& make_law, double seconds) {
+    if (items.scores.size() < 2 || items.scores.size() > FewLevelsLaw::most_levels) {
+        return std::nullopt;
+    }
+    const FewLevelsLaw law = make_law();
+    if (law.seconds() > seconds) {
+        return std::nullopt;
+    }
+    const auto tail = law.evaluate();
+    return tail ? std::optional(tails_of(*tail, LawKind::summed)) : std::nullopt;
+}
+
+// On few levels first by summing over them, if that is quick, or after an inversion that takes too long.
+template <class MakeLaw, class Inversion>
+std::optional<Tails> by_levels_or_inversion(const ScoredItems& items, const MakeLaw& make_law,
+                                            const Inversion& inversion, double seconds) {
+    if (auto tails = by_levels(items, make_law, std::min(quick_levels, seconds))) {
+        return tails;
+    }
+    if (auto tails = inversion(seconds)) {
+        return tails;
+    }
+    return by_levels(items, make_law, seconds);
+}
+
 // The statistic in the lower half of the law.
 std::optional<Tails> signed_rank_tails_at(const SignScores& scores, std::int64_t low, double seconds) {
     const bool centred = low == scores.sum - low;
@@ -98,7 +133,9 @@ std::optional<Tails> signed_rank_tails_at(const SignScores& scores, std::int64_t
     if (!setup_fits(items, seconds)) {
         return std::nullopt;
     }
-    auto tails = by_inversion(CertifiedInversion::of_signs(items), low, seconds);
+    auto tails = by_levels_or_inversion(
+        items, [&] { return FewLevelsLaw::of_signs(items, low); },
+        [&](double allowed) { return by_inversion(CertifiedInversion::of_signs(items), low, allowed); }, seconds);
     if (tails && centred) {
         tails->upper = tails->lower;
     }
@@ -115,16 +152,21 @@ std::optional<Tails> closed_form(const CanonicalChoice& law) {
     return closed_form(UntiedInversion::of_rank_sum(scores.chosen, rest), u, law.centred);
 }
 
-std::optional<Tails> by_inversion(const CanonicalChoice& law, double seconds) {
-    const ScoredItems items = ScoredItems::of(law.scores.scores);
-    if (!setup_fits(items, seconds) || items.scores.size() == 1) {
+std::optional<Tails> by_inversion(const CanonicalChoice& law, const ScoredItems& items, double seconds) {
+    if (!setup_fits(items, seconds)) {
         return std::nullopt;
     }
-    auto tails = by_inversion(CertifiedInversion::of_choice(items, law.scores.chosen), law.scores.statistic, seconds);
-    if (tails && law.centred) {
-        tails->upper = tails->lower;
-    }
-    return tails;
+    const auto [chosen, w] = std::pair(law.scores.chosen, law.scores.statistic);
+    const auto tails = by_levels_or_inversion(
+        items, [&] { return FewLevelsLaw::of_choice(items, chosen, w); },
+        [&](double allowed) { return by_inversion(CertifiedInversion::of_choice(items, chosen), w, allowed); },
+        seconds);
+    return tails ? std::optional(centred(*tails, law.centred)) : std::nullopt;
+}
+
+// Whether the number of all choices fits 63 bits, so that arrangements are counted.
+bool is_countable(const ChoiceScores& scores) {
+    return log2_choose(static_cast<std::int64_t>(scores.scores.size()), scores.chosen) < 62.9;
 }
 
 // The smaller sample so small beside the other that few frequencies are negligible.
@@ -134,27 +176,52 @@ bool is_unbalanced(const ChoiceScores& scores) {
     return m * (n - m) < least_spread_of_counts * n;
 }
 
-// One value against all others.
-std::optional<Tails> single_value_tails(const ChoiceScores& law) {
-    if (law.chosen != 1) {
+// Choices of one or two values with a sum of at most w, from both ends of the list.
+std::uint64_t choices_at_most(const std::vector<std::int64_t>& scores, std::int64_t chosen, std::int64_t w) {
+    if (chosen == 1) {
+        return static_cast<std::uint64_t>(std::upper_bound(scores.begin(), scores.end(), w) - scores.begin());
+    }
+    std::uint64_t count = 0;
+    std::size_t high = scores.size();
+    for (std::size_t low = 0; low < high; ++low) {
+        while (high > low + 1 && scores[low] + scores[high - 1] > w) {
+            --high;
+        }
+        count += high - low - 1;
+    }
+    return count;
+}
+
+// One or two values against all others.
+std::optional<Tails> one_or_two_values_tails(const ChoiceScores& law) {
+    if (law.chosen > 2) {
         return std::nullopt;
     }
-    const auto [first, last] = std::equal_range(law.scores.begin(), law.scores.end(), law.statistic);
-    return from_counts({static_cast<std::uint64_t>(last - law.scores.begin()),
-                        static_cast<std::uint64_t>(law.scores.end() - first),
-                        static_cast<std::uint64_t>(law.scores.size())});
+    const auto n = static_cast<std::uint64_t>(law.scores.size());
+    const std::uint64_t total = law.chosen == 1 ? n : n * (n - 1) / 2;
+    return from_counts({choices_at_most(law.scores, law.chosen, law.statistic),
+                        total - choices_at_most(law.scores, law.chosen, law.statistic - 1), total});
 }
 
 std::optional<Tails> rank_sum_tails_of(const CanonicalChoice& law, double seconds) {
     if (law.scores.scores.front() == law.scores.scores.back()) {
         return Tails(); // all equal: every choice has the same sum
     }
-    if (auto tails = single_value_tails(law.scores)) {
+    if (auto tails = one_or_two_values_tails(law.scores)) {
         return tails;
     }
     const double by_programme = rank_sum_cost(law.scores);
     const auto programme = [&] { return rank_sum_tails(law.scores); };
-    if (by_programme <= std::min(quick_choices, seconds)) {
+    const bool quick = by_programme <= std::min(quick_choices, seconds);
+    if (quick && is_countable(law.scores)) {
+        return programme();
+    }
+    const ScoredItems items = ScoredItems::of(law.scores.scores);
+    const auto levels = [&] { return FewLevelsLaw::of_choice(items, law.scores.chosen, law.scores.statistic); };
+    if (auto tails = by_levels(items, levels, std::min({quick_levels, seconds, by_programme}))) {
+        return centred(*tails, law.centred);
+    }
+    if (quick) {
         return programme();
     }
     if (auto tails = closed_form(law)) {
@@ -169,7 +236,7 @@ std::optional<Tails> rank_sum_tails_of(const CanonicalChoice& law, double second
             return tails;
         }
     }
-    if (auto tails = by_inversion(law, std::min({seconds, by_programme, at_low_end}))) {
+    if (auto tails = by_inversion(law, items, std::min({seconds, by_programme, at_low_end}))) {
         return tails;
     }
     if (std::min(by_programme, at_low_end) <= seconds) {

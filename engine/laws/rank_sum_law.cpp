@@ -75,7 +75,8 @@ Tails summed(const ChoiceScores& scores) {
     Tails tails;
     tails.lower = (mass.below + mass.at) / total;
     tails.upper = 1 - mass.below / total;
-    tails.relative_error = (static_cast<double>(n) + 12) * 0.5 * std::numeric_limits<double>::epsilon();
+    // An addition for each score, and for each group a product and a rounded binomial coefficient.
+    tails.relative_error = (3 * static_cast<double>(n) + 12) * 0.5 * std::numeric_limits<double>::epsilon();
     tails.law = LawKind::summed;
     return tails;
 }

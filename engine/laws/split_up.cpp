@@ -10,14 +10,21 @@ constexpr double seconds_per_addition = 0.2e-9;
 constexpr double seconds_per_merge = 2e-9;
 constexpr double most_cells = 5.5e6; // 44 MB of 64-bit counts
 
-// Additions that a half needs: every score adds each row once, over what can have been reached by then. On average
-// about half the scores have been seen when a cell is first reached.
-double additions(const std::vector<SumRange>& ranges, std::size_t scores) {
+// Additions that a half needs: every group of equal scores adds each row once for each number that can be taken of it,
+// about half of them on average, over what can have been reached by then, about half of the cells.
+double additions(const std::vector<SumRange>& ranges, std::span<const std::int64_t> half) {
+    const auto most = static_cast<std::int64_t>(ranges.size()) - 1;
     double cells = 0;
     for (const SumRange& range : ranges) {
         cells += static_cast<double>(range.size());
     }
-    return cells * static_cast<double>(scores) / 2;
+    double times = 0;
+    for (auto begin = half.begin(); begin != half.end();) {
+        const auto end = std::upper_bound(begin, half.end(), *begin);
+        times += static_cast<double>(std::min<std::int64_t>(end - begin, std::max<std::int64_t>(1, most / 2)));
+        begin = end;
+    }
+    return cells * times / 2;
 }
 
 double cells_of(const std::vector<SumRange>& ranges) {
@@ -71,7 +78,7 @@ double split_up_seconds(const ChoiceScores& scores) {
     if (cells > most_cells) {
         return std::numeric_limits<double>::infinity();
     }
-    return seconds_per_addition * (additions(lower, lower_half.size()) + additions(upper, upper_half.size())) +
+    return seconds_per_addition * (additions(lower, lower_half) + additions(upper, upper_half)) +
            seconds_per_merge * cells_of(lower);
 }
 

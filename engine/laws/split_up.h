@@ -2,6 +2,7 @@
 // sum taken from the lower half of the scores and from the upper half, each by itself, then both merged.
 #pragma once
 
+#include "binomial_coefficient.h"
 #include "compensated_sum.h"
 #include "rank_sum_law.h"
 
@@ -38,6 +39,21 @@ struct SumRange {
 // Predicted seconds; infinity where the work space would exceed its limit.
 [[nodiscard]] double split_up_seconds(const ChoiceScores& scores);
 
+// C(size, j) for j = 0 to `last`. A whole number too large for its type belongs to no choice that there is, as all of
+// them fit.
+template <class Count>
+[[nodiscard]] std::vector<Count> choices(std::int64_t size, std::int64_t last) {
+    std::vector<Count> ways;
+    for (std::int64_t j = 0; j <= last; ++j) {
+        if constexpr (std::is_same_v<Count, double>) {
+            ways.push_back(double_choose(size, j));
+        } else {
+            ways.push_back(static_cast<Count>(exact_choose(size, j).value_or(0)));
+        }
+    }
+    return ways;
+}
+
 // The distribution for one half: for each count a row of arrangements by sum, from ranges[count].low on.
 template <class Count>
 class HalfDistribution {
@@ -53,8 +69,12 @@ public:
             cells_[0] = 1;
         }
         least_ = least_sums(half);
-        for (std::size_t j = 0; j < half.size(); ++j) {
-            add(half, static_cast<std::int64_t>(j));
+        for (std::size_t begin = 0; begin < half.size();) {
+            const auto end =
+                std::upper_bound(half.begin() + static_cast<std::ptrdiff_t>(begin), half.end(), half[begin]);
+            const auto size = static_cast<std::size_t>(end - half.begin()) - begin;
+            add(half[begin], static_cast<std::int64_t>(begin), static_cast<std::int64_t>(size));
+            begin += size;
         }
     }
 
@@ -66,24 +86,28 @@ public:
     [[nodiscard]] std::int64_t most() const { return static_cast<std::int64_t>(ranges_.size()) - 1; }
 
 private:
-    // Takes score j or leaves it. Among the first j scores, c of them sum to least_[c] at least and to the sum of the
-    // c largest at most.
-    void add(std::span<const std::int64_t> half, std::int64_t j) {
-        const std::int64_t score = half[static_cast<std::size_t>(j)];
-        for (std::int64_t c = std::min(most(), j + 1); c >= 1; --c) {
+    // Takes some of `size` equal scores, after `seen` others. Among those, c sum to least_[c] at least and to the sum
+    // of the c largest at most. From the largest count down, so that what is read has not yet been added to.
+    void add(std::int64_t score, std::int64_t seen, std::int64_t size) {
+        const std::vector<Count> ways = choices<Count>(size, std::min(size, most()));
+        for (std::int64_t c = std::min(most(), seen + size); c >= 1; --c) {
             const SumRange& to = range(c);
-            const std::int64_t low = least_[static_cast<std::size_t>(c - 1)];
-            const std::int64_t largest =
-                least_[static_cast<std::size_t>(j)] - least_[static_cast<std::size_t>(j - c + 1)];
-            const std::int64_t high = std::min({largest, range(c - 1).high, to.high - score});
-            if (high < low) {
-                continue;
-            }
-            Count* __restrict target = row(c).data() + (low + score - to.low);
-            const Count* __restrict source = row(c - 1).data() + (low - range(c - 1).low);
-            const std::int64_t length = high - low + 1;
-            for (std::int64_t i = 0; i < length; ++i) {
-                target[i] += source[i];
+            for (std::int64_t taken = std::max<std::int64_t>(1, c - seen); taken <= std::min(size, c); ++taken) {
+                const std::int64_t before = c - taken;
+                const std::int64_t low = least_[static_cast<std::size_t>(before)];
+                const std::int64_t largest =
+                    least_[static_cast<std::size_t>(seen)] - least_[static_cast<std::size_t>(seen - before)];
+                const std::int64_t high = std::min({largest, range(before).high, to.high - taken * score});
+                if (high < low) {
+                    continue;
+                }
+                Count* __restrict target = row(c).data() + (low + taken * score - to.low);
+                const Count* __restrict source = row(before).data() + (low - range(before).low);
+                const Count factor = ways[static_cast<std::size_t>(taken)];
+                const std::int64_t length = high - low + 1;
+                for (std::int64_t i = 0; i < length; ++i) {
+                    target[i] += factor * source[i];
+                }
             }
         }
     }

@@ -76,6 +76,28 @@ TEST(Laws, give_up_on_sizes_that_would_take_too_long) {
     }
 }
 
+// The centre of a symmetric law: p = 1 two-sided, and half of 1 and the mass one-sided; the mass is about
+// 1 / sqrt(2 pi variance).
+TEST(Laws, reach_a_thousand_million_values_a_side) {
+    double p = 0;
+    ASSERT_EQ(rks_rank_sum_tail(1000000000, 1000000000, 5e17, 0, &p), RKS_OK);
+    EXPECT_EQ(p, 1);
+    ASSERT_EQ(rks_rank_sum_tail(1000000000, 1000000000, 5e17, 1, &p), RKS_OK);
+    EXPECT_NEAR(p, 0.5, 1e-10);
+    ASSERT_EQ(rks_signed_rank_tail(1000000000, 250000000250000000.0, -1, &p), RKS_OK);
+    EXPECT_NEAR(p, 0.5, 1e-10);
+    ASSERT_EQ(rks_rank_sum_tail(20, 1000000000, 1e10, -1, &p), RKS_OK);
+    EXPECT_NEAR(p, 0.5, 1e-7);
+}
+
+// The normal 5% point is 1.644854 (Abramowitz & Stegun 1964, table 26.1), exact to within 1/sqrt(N) of the spread.
+TEST(Laws, critical_values_of_very_large_samples_are_close_to_the_normal_ones) {
+    double critical = 0;
+    ASSERT_EQ(rks_rank_sum_critical(100000000, 100000000, 0.05, -1, &critical), RKS_OK);
+    const double spread = std::sqrt(1e16 * (2e8 + 1) / 12);
+    EXPECT_NEAR((5e15 - critical) / spread, 1.644854, 1e-5);
+}
+
 TEST(Laws, ends_of_the_range_are_one_arrangement) {
     double p = 0;
     for (std::size_t n = 1; n <= 50; ++n) {

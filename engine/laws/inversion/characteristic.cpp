@@ -11,6 +11,7 @@ namespace rankstead {
 namespace {
 
 constexpr double many = 50'000;
+constexpr double very_many = 500'000;
 constexpr double farthest_reach = 0.62; // of the series' radius
 constexpr double farthest_truncation = 1e-13;
 
@@ -34,7 +35,9 @@ std::vector<double> offsets_of(const ScoredItems& items, bool centred) {
 } // namespace
 
 Characteristic::Characteristic(ScoredItems items, double p, bool centred)
-    : items_(std::move(items)), size_(static_cast<double>(items_.size())), terms_(size_ > many ? 32 : 72),
+    : items_(std::move(items)), size_(static_cast<double>(items_.size())), terms_(size_ > very_many ? 16
+                                                                                  : size_ > many    ? 32
+                                                                                                    : 72),
       series_(p, static_cast<int>(terms_)), offsets_(offsets_of(items_, centred)), moment_(terms_ + 1, 0.0),
       absolute_moment_(terms_ + 1, 0.0) {
     for (const double offset : offsets_) {

@@ -14,6 +14,7 @@ namespace {
 constexpr double pi = std::numbers::pi;
 constexpr std::int64_t largest_transform = std::int64_t{1} << 21;
 constexpr double seconds_per_angle = 25e-9;
+constexpr double seconds_per_turn = 1.6e-9;
 constexpr double seconds_per_transformed = 150e-9;
 constexpr double seconds_per_group = 4e-9;
 constexpr double rounding_slack = 1e-6; // of the weights: far above the rounding of sums and transform
@@ -114,34 +115,117 @@ double steepest(const std::vector<std::int64_t>& scores, const std::vector<doubl
     return slope;
 }
 
-// Step by step, each as long as the last look proves: for a window of few groups over many scores.
-Screened swept_ranges(const std::vector<std::int64_t>& scores, const std::vector<double>& weights, const Window& window,
-                      const Need& need, double from, double seconds_allowed) {
-    const double slope = steepest(scores, weights, window);
-    const double shortest = 0.25 / static_cast<double>(window.range + 1);
-    const double seconds_per_step = seconds_per_angle * static_cast<double>(window.end - window.begin);
-    Screened result;
-    std::vector<FrequencyRange>& ranges = result.ranges;
-    for (double t = from; t < pi;) {
-        result.seconds += seconds_per_step;
-        if (result.seconds > seconds_allowed) {
-            add_range(ranges, {t, pi});
-            break;
-        }
-        std::complex<double> transform = 0;
+// Phases and weights of a window's groups, turned on step by step.
+class TurningWindow {
+public:
+    TurningWindow(const std::vector<std::int64_t>& scores, const std::vector<double>& weights, const Window& window) {
         for (std::size_t g = window.begin; g < window.end; ++g) {
-            const double angle = t * static_cast<double>(scores[g] - scores[window.begin]);
-            transform += weights[g] * std::complex<double>(std::cos(angle), std::sin(angle));
+            distance_.push_back(static_cast<double>(scores[g] - scores[window.begin]));
+            weight_.push_back(weights[g]);
         }
-        const double spare = window.weight * (1 - rounding_slack) - std::abs(transform) - need.at(t);
-        const double proven = slope > 0 ? spare / slope : spare > 0 ? pi : 0;
-        if (proven < shortest) {
-            add_range(ranges, {t, std::min(pi, t + shortest)});
-        }
-        t += std::max(proven, shortest);
+        re_.resize(weight_.size());
+        im_.resize(weight_.size());
+        step_re_.resize(weight_.size());
+        step_im_.resize(weight_.size());
     }
-    return result;
-}
+
+    [[nodiscard]] double size() const { return static_cast<double>(weight_.size()); }
+
+    // |C| at t.
+    [[nodiscard]] double transform_at(double t) const {
+        double re = 0;
+        double im = 0;
+        for (std::size_t g = 0; g < weight_.size(); ++g) {
+            re += weight_[g] * std::cos(t * distance_[g]);
+            im += weight_[g] * std::sin(t * distance_[g]);
+        }
+        return std::sqrt(re * re + im * im);
+    }
+
+    void start(double t, double step) {
+        for (std::size_t g = 0; g < weight_.size(); ++g) {
+            re_[g] = weight_[g] * std::cos(t * distance_[g]);
+            im_[g] = weight_[g] * std::sin(t * distance_[g]);
+            step_re_[g] = std::cos(step * distance_[g]);
+            step_im_[g] = std::sin(step * distance_[g]);
+        }
+    }
+
+    // |C| where it has been turned to; then one step on.
+    double turn() {
+        double re = 0;
+        double im = 0;
+        for (std::size_t g = 0; g < weight_.size(); ++g) {
+            re += re_[g];
+            im += im_[g];
+            const double turned = re_[g] * step_re_[g] - im_[g] * step_im_[g];
+            im_[g] = re_[g] * step_im_[g] + im_[g] * step_re_[g];
+            re_[g] = turned;
+        }
+        return std::sqrt(re * re + im * im);
+    }
+
+private:
+    std::vector<double> distance_;
+    std::vector<double> weight_;
+    std::vector<double> re_;
+    std::vector<double> im_;
+    std::vector<double> step_re_;
+    std::vector<double> step_im_;
+};
+
+// For a window of few groups over many scores: in equal steps, and where one of those does not prove enough, in steps
+// as long as each look proves.
+class Sweep {
+public:
+    Sweep(const std::vector<std::int64_t>& scores, const std::vector<double>& weights, const Window& window,
+          const Need& need, double seconds_allowed)
+        : turning_(scores, weights, window), need_(need), seconds_allowed_(seconds_allowed),
+          slope_(steepest(scores, weights, window)), provable_(window.weight * (1 - rounding_slack)),
+          step_(1 / static_cast<double>(window.range + 1)) {}
+
+    Screened from(double first) {
+        constexpr int renewal = 64;
+        int turns = 0;
+        for (double t = first; t < pi; t += step_) {
+            if (turns++ % renewal == 0) {
+                turning_.start(t, step_);
+                result_.seconds += seconds_per_angle * turning_.size();
+            }
+            result_.seconds += seconds_per_turn * turning_.size();
+            if (result_.seconds > seconds_allowed_) {
+                add_range(result_.ranges, {t, pi});
+                break;
+            }
+            if (provable_ - turning_.turn() - need_.at(t) < slope_ * step_) {
+                look_closely(t, std::min(pi, t + step_));
+            }
+        }
+        return result_;
+    }
+
+private:
+    void look_closely(double first, double last) {
+        for (double t = first; t < last;) {
+            result_.seconds += seconds_per_angle * turning_.size();
+            const double spare = provable_ - turning_.transform_at(t) - need_.at(t);
+            const double proven = slope_ > 0 ? spare / slope_ : spare > 0 ? pi : 0;
+            const double shortest = step_ / 4;
+            if (proven < shortest) {
+                add_range(result_.ranges, {t, std::min(last, t + shortest)});
+            }
+            t += std::max(proven, shortest);
+        }
+    }
+
+    TurningWindow turning_;
+    const Need& need_;
+    double seconds_allowed_;
+    double slope_;
+    double provable_;
+    double step_;
+    Screened result_;
+};
 
 // From one Fourier transform: for a window of many groups. The cells that are not proven, as ranges of t.
 Screened transformed_ranges(const std::vector<std::int64_t>& scores, const std::vector<double>& weights,
@@ -173,7 +257,7 @@ Screened unproven_ranges(const std::vector<std::int64_t>& scores, const std::vec
         return {{{from, pi}}, 0}; // too little weight to prove anything
     }
     const bool sweep = window.end - window.begin <= few || 8 * window.range > largest_transform;
-    return sweep ? swept_ranges(scores, weights, window, need, from, seconds_allowed)
+    return sweep ? Sweep(scores, weights, window, need, seconds_allowed).from(from)
                  : transformed_ranges(scores, weights, window, need, from);
 }
 

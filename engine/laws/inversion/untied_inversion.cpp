@@ -1,8 +1,6 @@
 #include "untied_inversion.h"
 
-#include "../compensated_sum.h"
-#include "contour_parts.h"
-#include "frequency_screen.h"
+#include "contour_sum.h"
 
 #include <algorithm>
 #include <cmath>
@@ -16,8 +14,8 @@ namespace {
 constexpr double pi = std::numbers::pi;
 constexpr double seconds_per_series = 0.4e-6;
 constexpr double seconds_per_factor = 15e-9;
+constexpr double seconds_per_sine = 40e-9;
 constexpr double seconds_per_term = 60e-9;
-constexpr double log_smallest = -760; // exp of it is 0
 
 class UntiedContour {
 public:
@@ -32,10 +30,10 @@ public:
             return CertifiedTail{};
         }
         choose_lattice();
-        if (!(alias_bound_ <= expected_value()) || !add_frequencies(seconds_allowed)) {
+        if (!(lattice_.alias_bound <= expected_value()) || !add_frequencies(seconds_allowed)) {
             return std::nullopt;
         }
-        return result();
+        return sum_->result({lambda_, distance_, jet_.value, jet_.error, 0}, lattice_, need_);
     }
 
 private:
@@ -112,10 +110,11 @@ private:
     // lack of 1 is bounded.
     [[nodiscard]] double aliases(double points) {
         double sum = 0;
-        alias_is_one_ = points > static_cast<double>(law_.highest() - w_); // then exactly, and no mass lies there
-        if (!alias_is_one_) {
+        // Beyond the highest exactly, and no mass lies there.
+        lattice_.alias_is_one = points > static_cast<double>(law_.highest() - w_);
+        if (!lattice_.alias_is_one) {
             const Alias up = alias(1, points);
-            alias_is_one_ = up.tilt < 0;
+            lattice_.alias_is_one = up.tilt < 0;
             sum += up.bound;
         }
         if (points <= static_cast<double>(w_)) {
@@ -128,75 +127,79 @@ private:
         const double target = wanted_accuracy * expected_value() / 4;
         const double most = static_cast<double>(law_.highest()) + 2;
         double points = std::ceil(std::sqrt(2 * std::log(1 / target) * jet_.second));
-        while (points < most && !((alias_bound_ = aliases(points)) <= target)) {
+        while (points < most && !((lattice_.alias_bound = aliases(points)) <= target)) {
             points = std::ceil(points * 1.07) + 1;
         }
         if (points >= most) {
             points = most;
-            alias_bound_ = aliases(points);
+            lattice_.alias_bound = aliases(points);
         }
-        points_ = static_cast<std::int64_t>(points);
+        lattice_.sum_points = static_cast<std::int64_t>(points);
         need_ = {-std::log(target), lambda_};
     }
 
+    [[nodiscard]] double angle(std::int64_t j) const { return lattice_.sum_angle(j); }
+
     bool add_frequencies(double seconds_allowed) {
-        const UntiedLaw::Tilted tilted(law_, lambda_, w_, points_);
-        const double step = 2 * pi / static_cast<double>(points_);
-        for (std::int64_t j = 0; j <= points_ / 2; ++j) {
-            const double t = step * static_cast<double>(j);
-            if (j > 0 && t > tilted.monotone_to() && tilted.decay_from(t) >= need_.at(t)) {
-                return true;
+        const UntiedLaw::Tilted tilted(law_, lambda_, w_, lattice_.sum_points);
+        sum_.emplace(lambda_);
+        constexpr double few_factors = 64;
+        std::int64_t j = 0;
+        for (; j <= lattice_.sum_points / 2; ++j) {
+            const double t = angle(j);
+            if (j > 0 && t > tilted.monotone_to()) {
+                if (tilted.decay_from(t) >= need_.at(t)) {
+                    return true;
+                }
+                if (law_.factors() <= few_factors) {
+                    break;
+                }
             }
-            work_ += tilted.by_series(j) ? seconds_per_series : law_.factors() * seconds_per_factor;
-            if (work_ > seconds_allowed) {
+            const std::optional<double> size = add(tilted, j, seconds_allowed);
+            if (!size) {
                 return false;
             }
-            const double size = add(tilted.at(j), j, t);
-            if (t < tilted.monotone_to() && size <= std::exp(-need_.at(t))) {
-                j = std::max(j, static_cast<std::int64_t>(tilted.monotone_to() / step));
+            if (t < tilted.monotone_to() && *size <= std::exp(-need_.at(t))) {
+                j = std::max(j, static_cast<std::int64_t>(tilted.monotone_to() / angle(1)));
             }
+        }
+        // Range by range, each a little wider than the one before.
+        while (j <= lattice_.sum_points / 2) {
+            const std::int64_t last = std::min(lattice_.sum_points / 2, j + j / 4);
+            if (!prove_or_add(tilted, j, last, seconds_allowed)) {
+                return false;
+            }
+            j = last + 1;
         }
         return true;
     }
 
-    // Adds a frequency; the most it can be in size.
-    double add(const UntiedLaw::Point& point, std::int64_t j, double t) {
-        const double multiple = j == 0 || 2 * j == points_ ? 1 : 2;
-        const Complex kernel = cumulative_kernel(lambda_, t);
-        cumulative_.add(multiple * (point.value.real() * kernel.real() - point.value.imag() * kernel.imag()));
-        mass_.add(multiple * point.value.real());
-        const double off = point.error + 12 * unit_roundoff * std::abs(point.value);
-        rounding_ += multiple * off * std::abs(kernel);
-        mass_rounding_ += multiple * off;
-        ++frequencies_;
-        return std::abs(point.value) + point.error;
+    // Proves that frequencies first to last are negligible, half by half, and adds those that are not. False where the
+    // work passes what is allowed.
+    bool prove_or_add(const UntiedLaw::Tilted& tilted, std::int64_t first, std::int64_t last, double seconds_allowed) {
+        work_ += law_.factors() * seconds_per_sine;
+        if (tilted.decay_within(angle(first), angle(last)) >= need_.at(angle(first))) {
+            return true;
+        }
+        if (last == first) {
+            return add(tilted, first, seconds_allowed).has_value();
+        }
+        const std::int64_t middle = first + (last - first) / 2;
+        return prove_or_add(tilted, first, middle, seconds_allowed) &&
+               prove_or_add(tilted, middle + 1, last, seconds_allowed);
     }
 
-    [[nodiscard]] std::optional<CertifiedTail> result() const {
-        const auto points = static_cast<double>(points_);
-        const double left_out = std::exp(-need_.base) * bound_slack;
-        const double span = lambda_ * points;
-        const double log_height = jet_.value + lambda_ * distance_ - log_kernel();
-        const double height_error =
-            jet_.error + (4 * (std::fabs(jet_.value) + std::fabs(lambda_ * distance_) + std::fabs(log_kernel())) + 40) *
-                             unit_roundoff;
-        const double known_alias = alias_is_one_ ? std::exp(-log_height - span) / -std::expm1(-span) : 0;
-        const double value = cumulative_.value() / points - known_alias;
-        const double absolute =
-            alias_bound_ + left_out + rounding_ / points + known_alias * (height_error + 4 * span * unit_roundoff);
-        if (!(value > 2 * absolute)) {
-            return std::nullopt;
-        }
-        CertifiedTail tail;
-        tail.lower = std::exp(log_height) * value;
-        const double scale = std::exp(log_height + log_kernel());
-        tail.mass = std::max(0.0, scale * mass_.value() / points);
-        tail.relative_error = (absolute / (value - absolute) + height_error) * bound_slack;
-        tail.mass_error = scale * (alias_bound_ / -std::expm1(-lambda_) +
-                                   left_out / std::abs(cumulative_kernel(lambda_, pi)) + mass_rounding_ / points) +
-                          tail.mass * height_error;
-        tail.frequencies = frequencies_;
-        return tail.relative_error <= useful_accuracy ? std::optional(tail) : std::nullopt;
+    // Adds a frequency and says the most it can be in size; empty where the work passes what is allowed.
+    std::optional<double> add(const UntiedLaw::Tilted& tilted, std::int64_t j, double seconds_allowed) {
+        work_ += tilted.by_series(j) ? seconds_per_series : law_.factors() * seconds_per_factor;
+        return work_ > seconds_allowed ? std::nullopt : std::optional(add(tilted.at(j), j, angle(j)));
+    }
+
+    // Adds a frequency; the most it can be in size.
+    double add(const UntiedLaw::Point& point, std::int64_t j, double t) {
+        const double multiple = j == 0 || 2 * j == lattice_.sum_points ? 1 : 2;
+        sum_->add(t, multiple, point.value, point.error, 1);
+        return std::abs(point.value) + point.error;
     }
 
     const UntiedLaw& law_;
@@ -204,16 +207,10 @@ private:
     double distance_;
     double lambda_ = 0;
     SumJet jet_;
-    std::int64_t points_ = 1;
-    bool alias_is_one_ = false;
-    double alias_bound_ = 0;
+    ContourLattice lattice_;
     Need need_;
-    CompensatedSum cumulative_;
-    CompensatedSum mass_;
-    double rounding_ = 0;
-    double mass_rounding_ = 0;
-    std::int64_t frequencies_ = 0;
-    double work_ = 0; // seconds, counted
+    std::optional<ContourSum> sum_; // once the tilt is found
+    double work_ = 0;               // seconds, counted
 };
 
 } // namespace

@@ -127,6 +127,30 @@ double UntiedLaw::Tilted::decay_from(double t) const {
     return lambda_ > 0.9 || total_weight_ < 10 ? 0 : total_weight_ - largest_weight_ / std::sin(t / 2) - log_condition_;
 }
 
+double UntiedLaw::Tilted::decay_within(double t1, double t2) const {
+    if (law_.kind_ != Kind::rank_sum) {
+        return 0;
+    }
+    double decay = 0;
+    double product = 1; // of the squares, so that one logarithm serves several factors
+    for (std::int64_t i = 1; i <= law_.m_; ++i) {
+        const auto item = static_cast<double>(i);
+        const double other = lambda_ * (item + static_cast<double>(law_.n_));
+        const bool turns = std::floor(item * t1 / (2 * pi)) != std::floor(item * t2 / (2 * pi));
+        const double sine =
+            turns ? 0 : std::min(std::fabs(std::sin(item * t1 / 2)), std::fabs(std::sin(item * t2 / 2)));
+        const double rest = -std::expm1(-lambda_ * item);
+        product *= 1 + 4 * (1 - rest) * sine * sine / (rest * rest);
+        const double above = std::tanh(other / 2); // (1 - r^b) / (1 + r^b)
+        product *= above * above;
+        if (product > 1e200 || product < 1e-200 || i == law_.m_) {
+            decay += std::log(product) / 2;
+            product = 1;
+        }
+    }
+    return decay - 1e-9 * std::fabs(decay);
+}
+
 double UntiedLaw::Tilted::angle(std::int64_t j) const {
     return 2 * pi * static_cast<double>(j) / static_cast<double>(points_);
 }
@@ -159,32 +183,52 @@ void UntiedLaw::Tilted::fill_denominators() const {
     }
 }
 
-// z^a for a = first, first + 1, ..., renewed every so often: each is then off by fewer than 60 roundings.
+// z^a and 1 - z^a for a = first, first + 1, ...: by multiplying with z and by adding z^a (1 - z), where nothing cancels
+// that does not belong to the result, renewed every so often. z^a is then off by fewer than 60 roundings of its size,
+// 1 - z^a by fewer than 60 of its size and of 16 times |1 - z|.
 class PowersOfZ {
 public:
     PowersOfZ(double lambda, std::int64_t j, std::int64_t points, std::int64_t first)
-        : lambda_(lambda), j_(j), points_(points), next_(first), step_(std::exp(-lambda) * exact_unit(j, 1, points)) {}
+        : lambda_(lambda), j_(j), points_(points), next_(first), step_(std::exp(-lambda) * exact_unit(j, 1, points)),
+          first_rest_(rest_of(1)) {}
 
-    std::complex<double> take() {
+    struct Taken {
+        Complex power;
+        Complex rest; // 1 - power
+    };
+
+    Taken take() {
         constexpr int renewal = 16;
         if (taken_ % renewal == 0) {
-            power_ = std::exp(-lambda_ * static_cast<double>(next_)) * exact_unit(j_, next_, points_);
+            current_ = {std::exp(-lambda_ * static_cast<double>(next_)) * exact_unit(j_, next_, points_),
+                        rest_of(next_)};
         }
-        const std::complex<double> result = power_;
-        power_ = times(power_, step_);
+        const Taken result = current_;
+        current_.rest += times(current_.power, first_rest_);
+        current_.power = times(current_.power, step_);
         ++taken_;
         ++next_;
         return result;
     }
 
+    [[nodiscard]] double size_of_first_rest() const { return std::sqrt(std::norm(first_rest_)); }
+
 private:
+    [[nodiscard]] Complex rest_of(std::int64_t a) const {
+        const double x = lambda_ * static_cast<double>(a);
+        const Complex turn = exact_unit(j_, a, points_);
+        const Complex half = exact_unit(j_, a, 2 * points_);
+        return {-std::expm1(-x) + std::exp(-x) * 2 * half.imag() * half.imag(), -std::exp(-x) * turn.imag()};
+    }
+
     double lambda_;
     std::int64_t j_;
     std::int64_t points_;
     std::int64_t next_;
     int taken_ = 0;
-    std::complex<double> step_;
-    std::complex<double> power_;
+    Complex step_;
+    Complex first_rest_;
+    Taken current_;
 };
 
 UntiedLaw::Point UntiedLaw::Tilted::from_product(std::int64_t j) const {
@@ -194,23 +238,21 @@ UntiedLaw::Point UntiedLaw::Tilted::from_product(std::int64_t j) const {
     constexpr double roundings = 60;
     PowersOfZ low(lambda_, j, points_, 1);
     PowersOfZ high(lambda_, j, points_, law_.n_ + 1);
-    std::complex<double> product = 1;
+    const double step = 16 * low.size_of_first_rest();
+    Complex product = 1;
     double off = 0;
     for (std::int64_t i = 1; i <= law_.m_; ++i) {
         const double real = real_[static_cast<std::size_t>(i - 1)];
-        const std::complex<double> z = low.take();
+        const PowersOfZ::Taken z = low.take();
         if (law_.kind_ == Kind::signed_rank) {
-            const std::complex<double> factor = 1.0 + z;
+            const Complex factor = 1.0 + z.power;
             product = times(product, factor) * real;
-            off += roundings * std::sqrt(std::norm(z) / std::max(std::norm(factor), 1e-100));
+            off += roundings * std::sqrt(std::norm(z.power) / std::max(std::norm(factor), 1e-100));
         } else {
-            const std::complex<double> y = high.take();
-            const std::complex<double> above = 1.0 - y;
-            const std::complex<double> below = std::conj(1.0 - z);
-            const double size = std::norm(below);
-            product = times(product, times(above, below)) * (real / size);
-            off += roundings *
-                   (std::sqrt(std::norm(z) / size) + std::sqrt(std::norm(y) / std::max(std::norm(above), 1e-100)));
+            const Complex above = high.take().rest;
+            const double size = std::norm(z.rest);
+            product = times(product, times(above, std::conj(z.rest))) * (real / size);
+            off += roundings * (2 + step / std::sqrt(size) + step / std::sqrt(std::max(std::norm(above), 1e-100)));
         }
         off += 16 + 2 * lambda_ * static_cast<double>(i + law_.n_);
     }

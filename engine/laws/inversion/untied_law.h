@@ -15,6 +15,9 @@
 //     w_max / sin(t / 2) (summation by parts), and less than V, their sum, for all larger t at once. For the rank sum,
 //     the number of items taken is conditioned on; it has its mode at its mean m (Darroch 1964), so its probability is
 //     at least (3/4) / (4 sqrt(V) + 1), by Chebyshev's inequality.
+//   - Few factors prove too little that way, but can be looked at over a range of t at once: in the rank sum
+//     |1 - z^b| <= 1 + r^b, and |1 - z^a|^2 = (1 - r^a)^2 + 4 r^a sin^2(at/2), where the sine is least at an end of the
+//     range or 0 within it.
 #pragma once
 
 #include "even_series.h"
@@ -54,6 +57,8 @@ public:
         [[nodiscard]] double monotone_to() const { return monotone_to_; }
         // A lower bound on -log |G(z) / G(e^-lambda)| that holds from t to pi.
         [[nodiscard]] double decay_from(double t) const;
+        // One that holds from t1 to t2; of the rank sum only, else 0.
+        [[nodiscard]] double decay_within(double t1, double t2) const;
 
     private:
         [[nodiscard]] double angle(std::int64_t j) const;

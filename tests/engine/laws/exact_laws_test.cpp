@@ -83,6 +83,19 @@ TEST(BestLaws, are_the_saddlepoint_approximation_where_the_time_allowed_is_too_s
     EXPECT_EQ(best_signed_rank_tails(signs, 0.5).law, LawKind::inverted);
 }
 
+TEST(ExactLaws, count_pairs_of_values_as_the_programme_does) {
+    test::Random random(36);
+    for (const std::int64_t levels : {3, 40, 1000}) {
+        const ChoiceScores scores =
+            choice_scores(rank_pooled(random.sorted(2, 0, levels), random.sorted(60, 0, levels), std::int64_t{0}));
+        const Tails tails = exact_rank_sum_tails(scores, 1);
+        const auto exact = test::big_choice_tails(scores.scores, 2, scores.statistic);
+        EXPECT_EQ(test::Big(tails.counts->lower), exact.lower);
+        EXPECT_EQ(test::Big(tails.counts->upper), exact.upper);
+        EXPECT_EQ(tails.counts->total, 62U * 61 / 2);
+    }
+}
+
 // One value is the lowest of N with probability 1/N, whatever N is.
 TEST(ExactLaws, count_the_place_of_a_single_value_among_a_million) {
     ChoiceScores scores = untied_choice_scores(1, 1'000'000, 2);
