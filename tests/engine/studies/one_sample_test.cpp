@@ -123,7 +123,7 @@ TEST(SignedRankTest, is_exact_with_a_hundred_and_fifty_thousand_differences) {
 
 TEST(SignedRankTest, falls_back_to_the_saddlepoint_where_the_exact_law_would_take_too_long) {
     test::Random random(65);
-    const Outcome outcome = test::changes(random.numbers(1000000, -6, 6));
+    const Outcome outcome = test::changes(random.numbers(1000000, -5, 5));
     EXPECT_FALSE(outcome.exact);
     EXPECT_EQ(outcome.law, LawKind::saddlepoint);
     EXPECT_TRUE(outcome.observations.exact_wanted_but_too_long);
