@@ -88,6 +88,9 @@ inline Reading read_notes(const Outcome& outcome) {
 }
 
 inline Reading read_check(const Outcome& outcome) {
+    if (!std::isfinite(outcome.estimate)) {
+        return std::string("ok, but without an estimate: it is beyond the largest number that a cell can hold.");
+    }
     const std::string& reason = outcome.observations.interval_reason;
     return reason.empty() ? std::string("ok") : "ok, but without limits: " + reason;
 }

@@ -71,7 +71,7 @@ bool setup_fits(const ScoredItems& items, double seconds) {
 }
 
 // In the corners where the closed form has to multiply factor by factor.
-constexpr double seconds_for_closed_form = 0.01;
+constexpr double seconds_for_closed_form = 0.06;
 constexpr std::int64_t most_listed = 4'000'000; // scores that are written down
 constexpr std::size_t least_closed = 130;       // values from which on frequencies are negligible without ties
 

@@ -154,7 +154,7 @@ std::vector<Count> gaussian_binomial(std::int64_t m, std::int64_t n, std::int64_
 
 // The table costs two additions for each value of U in the lower half and each of the smaller sample.
 constexpr double most_additions = 4e6;
-constexpr std::int64_t most_partition_additions = 1'000'000;
+constexpr std::int64_t most_low_additions = 500'000;
 
 bool integers_suffice(std::int64_t first, std::int64_t second) {
     const double pairs = static_cast<double>(first) * static_cast<double>(second);
@@ -162,34 +162,37 @@ bool integers_suffice(std::int64_t first, std::int64_t second) {
            log2_choose(first + second, first) < 126;
 }
 
-// Near the low end: the arrangements with U = k are the partitions of k into at most m parts, of which none can exceed
-// the other sample as long as k does not (Andrews 1976). Empty where that does not hold or their number leaves the
-// range of a double.
-std::optional<Tails> partition_tails(std::int64_t m, std::int64_t n, std::int64_t u) {
-    constexpr double largest_count = 1000; // binary digits
-    if (u > n || m * u > most_partition_additions || log2_choose(m + n, m) > largest_count) {
+// Near the low end few arrangements have U at most u, so few that they fit 126 bits however many there are in all: then
+// the counts modulo 2^128 are the counts. Chernoff's inequality says whether they do.
+bool few_enough(const UntiedLaw& law, double log2_total, std::int64_t u) {
+    constexpr double most_log2 = 126;
+    const double distance = static_cast<double>(law.highest()) / 2 - static_cast<double>(u);
+    // Nearer the middle the inversion is quicker than this question.
+    constexpr double far = 5;
+    if (distance * distance < far * far * law.variance()) {
+        return false;
+    }
+    double least = 0;
+    for (double tilt = distance / law.variance(); tilt < 4; tilt *= 2) {
+        least = std::min(least, law.jet(tilt).value - tilt * distance);
+    }
+    return log2_total + least / std::log(2.0) < most_log2;
+}
+
+std::optional<Tails> low_tails(const UntiedLaw& law, std::int64_t m, std::int64_t n, std::int64_t u) {
+    constexpr double largest_total = 1000; // binary digits that a double holds
+    const double log2_total = log2_choose(m + n, m);
+    if (u > most_low_additions / m || log2_total > largest_total || !few_enough(law, log2_total, u)) {
         return std::nullopt;
     }
-    std::vector<double> count(static_cast<std::size_t>(u + 1), 0.0);
-    count[0] = 1;
-    for (std::int64_t part = 1; part <= std::min(m, u); ++part) {
-        for (std::int64_t k = part; k <= u; ++k) {
-            count[static_cast<std::size_t>(k)] += count[static_cast<std::size_t>(k - part)];
-        }
-    }
-    CompensatedSum below;
-    for (std::size_t k = 0; k + 1 < count.size(); ++k) {
-        below.add(count[k]);
-    }
-    CompensatedSum through = below;
-    through.add(count.back());
+    const std::vector<UInt128> count = gaussian_binomial<UInt128>(m, n, u);
+    const UInt128 through = std::accumulate(count.begin(), count.end(), UInt128{0});
     const double total = double_choose(m + n, m);
     Tails tails;
     tails.law = LawKind::summed;
-    tails.lower = through.value() / total;
-    tails.upper = 1 - below.value() / total;
-    tails.relative_error =
-        (static_cast<double>(m + std::min(m, u)) + 12) * 0.5 * std::numeric_limits<double>::epsilon();
+    tails.lower = static_cast<double>(through) / total;
+    tails.upper = 1 - static_cast<double>(through - count.back()) / total;
+    tails.relative_error = (static_cast<double>(m) + 12) * 0.5 * std::numeric_limits<double>::epsilon();
     return tails;
 }
 
@@ -247,11 +250,12 @@ Tails UntiedRankSumLaw::at(std::int64_t k) const {
     const std::int64_t pairs = first_ * second_;
     const bool above = k > pairs - k;
     const std::int64_t low = above ? pairs - k : k;
-    const auto partitions =
-        cumulative_ ? std::nullopt : partition_tails(std::min(first_, second_), std::max(first_, second_), low);
-    Tails tails = cumulative_  ? cumulative_->at(static_cast<std::size_t>(low))
-                  : partitions ? *partitions
-                               : untied_rank_sum_tails(first_, second_, low, *inversion_);
+    const auto few = cumulative_
+                         ? std::nullopt
+                         : low_tails(inversion_->law(), std::min(first_, second_), std::max(first_, second_), low);
+    Tails tails = cumulative_ ? cumulative_->at(static_cast<std::size_t>(low))
+                  : few       ? *few
+                              : untied_rank_sum_tails(first_, second_, low, *inversion_);
     if (low == pairs - low) {
         tails.upper = tails.lower;
     }

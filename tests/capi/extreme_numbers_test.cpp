@@ -57,6 +57,7 @@ TEST(ExtremeNumbers, differences_beyond_the_largest_double) {
         EXPECT_NE(inquiry.text(answer).find("too large"), std::string::npos) << inquiry.text(answer);
     }
     EXPECT_NE(inquiry.text("sentence").find("beyond 1.79769e+308"), std::string::npos) << inquiry.text("sentence");
+    EXPECT_NE(inquiry.text("check").find("without an estimate"), std::string::npos) << inquiry.text("check");
     expect_no_text_of_an_infinite_number(inquiry);
 }
 

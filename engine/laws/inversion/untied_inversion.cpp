@@ -13,7 +13,7 @@ namespace {
 
 constexpr double pi = std::numbers::pi;
 constexpr double seconds_per_series = 0.4e-6;
-constexpr double seconds_per_factor = 15e-9;
+constexpr double seconds_per_factor = 35e-9;
 constexpr double seconds_per_sine = 40e-9;
 constexpr double seconds_per_term = 60e-9;
 

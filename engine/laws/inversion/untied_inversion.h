@@ -23,6 +23,8 @@ public:
     // the range of a double is 0.
     [[nodiscard]] std::optional<CertifiedTail> at(std::int64_t w, double seconds_allowed) const;
 
+    [[nodiscard]] const UntiedLaw& law() const { return law_; }
+
 private:
     explicit UntiedInversion(UntiedLaw law) : law_(std::move(law)) {}
 
