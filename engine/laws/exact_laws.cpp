@@ -156,7 +156,8 @@ std::optional<Tails> by_inversion(const CanonicalChoice& law, const ScoredItems&
     if (!setup_fits(items, seconds)) {
         return std::nullopt;
     }
-    const auto [chosen, w] = std::pair(law.scores.chosen, law.scores.statistic);
+    const std::int64_t chosen = law.scores.chosen;
+    const std::int64_t w = law.scores.statistic;
     const auto tails = by_levels_or_inversion(
         items, [&] { return FewLevelsLaw::of_choice(items, chosen, w); },
         [&](double allowed) { return by_inversion(CertifiedInversion::of_choice(items, chosen), w, allowed); },

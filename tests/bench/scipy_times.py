@@ -3,7 +3,7 @@
     /usr/bin/python3 scipy_times.py OUTPUT [--quick]
 
 Its exact rank sum law keeps what it has computed for as long as the process lives, so each measurement is made in a
-process of its own, which has answered for samples of five before: as the first p of its size in a session.
+process of its own, which has answered for samples of five before: as the first p of its size in a run of Python.
 """
 import json
 import multiprocessing
