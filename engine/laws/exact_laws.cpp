@@ -27,16 +27,9 @@ constexpr double least_spread_of_counts = 35;
 constexpr double setup_seconds_per_score = 60e-9;
 
 Tails tails_of(const CertifiedTail& tail, LawKind law) {
-    Tails tails;
-    tails.law = law;
-    tails.lower = tail.lower;
-    tails.upper = std::min(1.0, 1 - tail.lower + tail.mass);
     // The upper tail is the larger one here, or both are near one half: its absolute error over one half.
-    tails.relative_error =
-        tail.lower < smallest_positive_p
-            ? std::numeric_limits<double>::infinity()
-            : std::max(tail.relative_error, 2 * (tail.relative_error * tail.lower + tail.mass_error));
-    return tails;
+    const double error = std::max(tail.relative_error, 2 * (tail.relative_error * tail.lower + tail.mass_error));
+    return from_lower(law, tail.lower, 1 - tail.lower + tail.mass, error);
 }
 
 std::optional<Tails> by_inversion(const CertifiedInversion& inversion, std::int64_t statistic, double seconds) {
@@ -53,17 +46,10 @@ std::optional<Tails> lowest_sum_tails(const ChoiceScores& law) {
     const auto [begin, end] = std::equal_range(law.scores.begin(), law.scores.end(), law.scores[m - 1]);
     const std::int64_t wanted = law.scores.begin() + law.chosen - begin;
     const auto n = static_cast<std::int64_t>(law.scores.size());
-    Tails tails;
-    tails.lower = std::exp2(log2_choose(end - begin, wanted) - log2_choose(n, law.chosen));
     // log n! is right to a few units in the last place of n log n.
-    tails.relative_error = 16 * unit_roundoff * static_cast<double>(n) * (std::log(static_cast<double>(n)) + 1);
-    return tails.relative_error <= 1e-10 ? std::optional(tails) : std::nullopt;
-}
-
-// At the centre of a symmetric law both tails are equal.
-Tails centred(Tails tails, bool at_centre) {
-    tails.upper = at_centre ? tails.lower : tails.upper;
-    return tails;
+    const double error = 16 * unit_roundoff * static_cast<double>(n) * (std::log(static_cast<double>(n)) + 1);
+    const double lower = std::exp2(log2_choose(end - begin, wanted) - log2_choose(n, law.chosen));
+    return error <= useful_accuracy ? std::optional(from_lower(LawKind::summed, lower, 1, error)) : std::nullopt;
 }
 
 bool setup_fits(const ScoredItems& items, double seconds) {
@@ -81,16 +67,9 @@ bool is_run(const std::vector<std::int64_t>& scores, std::int64_t first) {
            std::adjacent_find(scores.begin(), scores.end()) == scores.end();
 }
 
-std::optional<Tails> closed_form(const UntiedInversion& inversion, std::int64_t low, bool centred) {
+std::optional<Tails> closed_form(const UntiedInversion& inversion, std::int64_t low) {
     const auto tail = inversion.at(low, seconds_for_closed_form);
-    if (!tail) {
-        return std::nullopt;
-    }
-    Tails tails = tails_of(*tail, LawKind::closed);
-    if (centred) {
-        tails.upper = tails.lower;
-    }
-    return tails;
+    return tail ? std::optional(tails_of(*tail, LawKind::closed)) : std::nullopt;
 }
 
 // On few levels, within the time allowed.
@@ -107,62 +86,34 @@ std::optional<Tails> by_levels(const ScoredItems& items, const MakeLaw& make_law
     return tail ? std::optional(tails_of(*tail, LawKind::summed)) : std::nullopt;
 }
 
-// On few levels first by summing over them, if that is quick, or after an inversion that takes too long.
-template <class MakeLaw, class Inversion>
-std::optional<Tails> by_levels_or_inversion(const ScoredItems& items, const MakeLaw& make_law,
-                                            const Inversion& inversion, double seconds) {
-    if (auto tails = by_levels(items, make_law, std::min(quick_levels, seconds))) {
-        return tails;
-    }
-    if (auto tails = inversion(seconds)) {
-        return tails;
-    }
-    return by_levels(items, make_law, seconds);
-}
-
 // The statistic in the lower half of the law.
 std::optional<Tails> signed_rank_tails_at(const SignScores& scores, std::int64_t low, double seconds) {
-    const bool centred = low == scores.sum - low;
     if (is_run(scores.scores, 1)) {
         const auto n = static_cast<std::int64_t>(scores.scores.size());
-        if (auto tails = closed_form(UntiedInversion::of_signed_rank(n), low, centred)) {
+        if (auto tails = closed_form(UntiedInversion::of_signed_rank(n), low)) {
             return tails;
         }
     }
     const ScoredItems items = ScoredItems::of(scores.scores);
-    if (!setup_fits(items, seconds)) {
-        return std::nullopt;
+    const auto levels = [&] { return FewLevelsLaw::of_signs(items, low); };
+    if (auto tails = by_levels(items, levels, std::min(quick_levels, seconds))) {
+        return tails;
     }
-    auto tails = by_levels_or_inversion(
-        items, [&] { return FewLevelsLaw::of_signs(items, low); },
-        [&](double allowed) { return by_inversion(CertifiedInversion::of_signs(items), low, allowed); }, seconds);
-    if (tails && centred) {
-        tails->upper = tails->lower;
+    if (setup_fits(items, seconds)) {
+        if (auto tails = by_inversion(CertifiedInversion::of_signs(items), low, seconds)) {
+            return tails;
+        }
     }
-    return tails;
+    return by_levels(items, levels, seconds);
 }
 
-std::optional<Tails> closed_form(const CanonicalChoice& law) {
-    const ChoiceScores& scores = law.scores;
-    if (scores.scores.size() < least_closed || !is_run(scores.scores, 0)) {
+std::optional<Tails> closed_form(const ChoiceScores& law) {
+    if (law.scores.size() < least_closed || !is_run(law.scores, 0)) {
         return std::nullopt;
     }
-    const auto rest = static_cast<std::int64_t>(scores.scores.size()) - scores.chosen;
-    const std::int64_t u = scores.statistic - scores.chosen * (scores.chosen - 1) / 2;
-    return closed_form(UntiedInversion::of_rank_sum(scores.chosen, rest), u, law.centred);
-}
-
-std::optional<Tails> by_inversion(const CanonicalChoice& law, const ScoredItems& items, double seconds) {
-    if (!setup_fits(items, seconds)) {
-        return std::nullopt;
-    }
-    const std::int64_t chosen = law.scores.chosen;
-    const std::int64_t w = law.scores.statistic;
-    const auto tails = by_levels_or_inversion(
-        items, [&] { return FewLevelsLaw::of_choice(items, chosen, w); },
-        [&](double allowed) { return by_inversion(CertifiedInversion::of_choice(items, chosen), w, allowed); },
-        seconds);
-    return tails ? std::optional(centred(*tails, law.centred)) : std::nullopt;
+    const auto rest = static_cast<std::int64_t>(law.scores.size()) - law.chosen;
+    const std::int64_t u = law.statistic - law.chosen * (law.chosen - 1) / 2;
+    return closed_form(UntiedInversion::of_rank_sum(law.chosen, rest), u);
 }
 
 // Whether the number of all choices fits 63 bits, so that arrangements are counted.
@@ -204,47 +155,54 @@ std::optional<Tails> one_or_two_values_tails(const ChoiceScores& law) {
                         total - choices_at_most(law.scores, law.chosen, law.statistic - 1), total});
 }
 
-std::optional<Tails> rank_sum_tails_of(const CanonicalChoice& law, double seconds) {
-    if (law.scores.scores.front() == law.scores.scores.back()) {
+// Canonical scores.
+std::optional<Tails> rank_sum_tails_of(const ChoiceScores& law, double seconds) {
+    if (law.scores.front() == law.scores.back()) {
         return Tails(); // all equal: every choice has the same sum
     }
-    if (auto tails = one_or_two_values_tails(law.scores)) {
+    if (auto tails = one_or_two_values_tails(law)) {
         return tails;
     }
-    const double by_programme = rank_sum_cost(law.scores);
-    const auto programme = [&] { return rank_sum_tails(law.scores); };
+    const double by_programme = rank_sum_cost(law);
     const bool quick = by_programme <= std::min(quick_choices, seconds);
-    if (quick && is_countable(law.scores)) {
-        return programme();
+    if (quick && is_countable(law)) {
+        return rank_sum_tails(law);
     }
-    const ScoredItems items = ScoredItems::of(law.scores.scores);
-    const auto levels = [&] { return FewLevelsLaw::of_choice(items, law.scores.chosen, law.scores.statistic); };
+    const ScoredItems items = ScoredItems::of(law.scores);
+    const auto levels = [&] { return FewLevelsLaw::of_choice(items, law.chosen, law.statistic); };
     if (auto tails = by_levels(items, levels, std::min({quick_levels, seconds, by_programme}))) {
-        return centred(*tails, law.centred);
+        return tails;
     }
     if (quick) {
-        return programme();
+        return rank_sum_tails(law);
     }
     if (auto tails = closed_form(law)) {
         return tails;
     }
-    if (by_programme <= seconds && is_unbalanced(law.scores)) {
-        return programme();
+    if (by_programme <= seconds && is_unbalanced(law)) {
+        return rank_sum_tails(law);
     }
-    const double at_low_end = low_end_seconds(law.scores);
+    const double at_low_end = low_end_seconds(law);
     if (at_low_end <= std::min(quick_choices, seconds)) {
-        if (auto tails = low_end_tails(law.scores)) {
+        if (auto tails = low_end_tails(law)) {
             return tails;
         }
     }
-    if (auto tails = by_inversion(law, items, std::min({seconds, by_programme, at_low_end}))) {
+    const double for_inversion = std::min({seconds, by_programme, at_low_end});
+    if (setup_fits(items, for_inversion)) {
+        const auto inversion = CertifiedInversion::of_choice(items, law.chosen);
+        if (auto tails = by_inversion(inversion, law.statistic, for_inversion)) {
+            return tails;
+        }
+    }
+    if (auto tails = by_levels(items, levels, for_inversion)) {
         return tails;
     }
     if (std::min(by_programme, at_low_end) <= seconds) {
-        const auto tails = at_low_end < by_programme ? low_end_tails(law.scores) : std::nullopt;
-        return tails || by_programme > seconds ? tails : programme();
+        const auto tails = at_low_end < by_programme ? low_end_tails(law) : std::nullopt;
+        return tails || by_programme > seconds ? tails : rank_sum_tails(law);
     }
-    return lowest_sum_tails(law.scores);
+    return lowest_sum_tails(law);
 }
 
 } // namespace
@@ -259,8 +217,9 @@ Tails exact_signed_rank_tails(const SignScores& scores, double seconds) {
     }
     const bool above = scores.statistic > scores.sum - scores.statistic;
     const std::int64_t low = above ? scores.sum - scores.statistic : scores.statistic;
-    if (const auto tails = signed_rank_tails_at(scores, low, std::min(seconds, by_programme))) {
-        return above ? tails->swapped() : *tails;
+    if (const auto found = signed_rank_tails_at(scores, low, std::min(seconds, by_programme))) {
+        const Tails tails = levelled(*found, low == scores.sum - low);
+        return above ? tails.swapped() : tails;
     }
     if (by_programme > seconds) {
         throw LawTooLong();
@@ -270,15 +229,16 @@ Tails exact_signed_rank_tails(const SignScores& scores, double seconds) {
 
 Tails exact_rank_sum_tails(const ChoiceScores& scores, double seconds) {
     const CanonicalChoice law = canonical(scores);
-    const auto tails = rank_sum_tails_of(law, seconds);
-    if (!tails) {
+    const auto found = rank_sum_tails_of(law.scores, seconds);
+    if (!found) {
         throw LawTooLong();
     }
-    return law.swaps ? tails->swapped() : *tails;
+    const Tails tails = levelled(*found, law.centred);
+    return law.swaps ? tails.swapped() : tails;
 }
 
 Tails untied_signed_rank_tails(std::int64_t n, std::int64_t low, const UntiedInversion& inversion) {
-    if (const auto tails = closed_form(inversion, low, false)) {
+    if (const auto tails = closed_form(inversion, low)) {
         return *tails;
     }
     if (n > most_listed) {
@@ -289,7 +249,7 @@ Tails untied_signed_rank_tails(std::int64_t n, std::int64_t low, const UntiedInv
 
 Tails untied_rank_sum_tails(std::int64_t first, std::int64_t second, std::int64_t low,
                             const UntiedInversion& inversion) {
-    if (const auto tails = closed_form(inversion, low, false)) {
+    if (const auto tails = closed_form(inversion, low)) {
         return *tails;
     }
     if (first + second > most_listed) {

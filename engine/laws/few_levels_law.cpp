@@ -1,6 +1,7 @@
 #include "few_levels_law.h"
 
-#include "inversion/stirling.h"
+#include "inversion/contour_tilt.h"
+#include "tails.h"
 
 #include <algorithm>
 #include <cmath>
@@ -13,6 +14,7 @@ namespace {
 constexpr double seconds_per_product = 0.7e-9; // of the cumulative sums
 constexpr double seconds_per_sum = 5e-9;
 constexpr double negligible = 1e-25; // of the weight at the mode
+constexpr double most_sums = 1e12;   // far more than any time allows
 
 double product_of_widths(std::size_t levels, const auto& width) {
     double product = 1;
@@ -38,11 +40,7 @@ FewLevelsLaw FewLevelsLaw::of_choice(const ScoredItems& items, std::int64_t chos
 }
 
 FewLevelsLaw::FewLevelsLaw(const ScoredItems& items, double p, Count count, std::int64_t chosen, std::int64_t w)
-    : law_(items, p, count == Count::fixed), count_(count), chosen_(chosen), w_(w) {
-    const auto n = static_cast<Wide>(items.size());
-    const auto sum = static_cast<Wide>(items.sum());
-    distance_ = free() ? static_cast<double>(2 * static_cast<Wide>(w) - sum) / 2
-                       : static_cast<double>(static_cast<Wide>(w) * n - chosen * sum) / static_cast<double>(n);
+    : law_(items, p, count == Count::fixed), tail_(law_, count, chosen, w) {
     find_tilt();
     fill_levels();
 }
@@ -50,21 +48,17 @@ FewLevelsLaw::FewLevelsLaw(const ScoredItems& items, double p, Count count, std:
 // The tilt at which the mean is w; any tilt will do, so that a few steps of Newton's method are enough.
 void FewLevelsLaw::find_tilt() {
     constexpr int most_steps = 40;
+    const double spread = std::sqrt(tail_.variance());
     for (int step = 0; step < most_steps; ++step) {
-        const double reach = std::fabs(a_) + lambda_ * law_.largest_offset();
-        const Jet jet = law_.jet(a_, -lambda_, law_.series_serves(reach));
-        // Of a free count the score is taken as it is: the jet's sum is about the mean.
-        const double off = jet.by_sum - distance_;
-        const double determinant = jet.by_count_twice * jet.by_sum_twice - jet.by_both * jet.by_both;
-        const double dl =
-            free() ? off / jet.by_sum_twice : (jet.by_count_twice * off - jet.by_both * jet.by_count) / determinant;
-        const double da = free() ? 0 : -(jet.by_count - jet.by_both * dl) / jet.by_count_twice;
-        if (!std::isfinite(dl) || std::fabs(dl) <= 1e-3 / std::sqrt(jet.by_sum_twice)) {
+        const Jet jet = jet_at(law_, a_, lambda_);
+        const TiltStep wanted =
+            newton_step(jet, {jet.by_count, tail_.distance() - jet.by_sum, jet.by_sum_twice}, !free(), true);
+        if (!std::isfinite(wanted.lambda) || std::fabs(wanted.lambda) <= 1e-3 / std::sqrt(jet.by_sum_twice)) {
             return;
         }
-        const double most = std::fabs(lambda_) + 2 / std::sqrt(law_.sum_of_squares() * law_.p() * (1 - law_.p()));
-        const double taken = std::clamp(dl, -most, most);
-        a_ += da * (taken / dl);
+        const double most = std::fabs(lambda_) + 2 / spread;
+        const double taken = std::clamp(wanted.lambda, -most, most);
+        a_ += wanted.a * (taken / wanted.lambda);
         lambda_ = std::max(0.0, lambda_ + taken);
     }
 }
@@ -106,12 +100,18 @@ FewLevelsLaw::Level FewLevelsLaw::level_of(std::size_t group) {
     level.least = level.mode - static_cast<std::int64_t>(below.size());
     level.weights.assign(below.rbegin(), below.rend());
     level.weights.insert(level.weights.end(), above.begin(), above.end());
+    // More of a level than add up to w by themselves are in no sum.
+    if (level.score > 0 && level.most() > tail_.w() / level.score) {
+        const std::int64_t most = std::max(level.least, tail_.w() / level.score);
+        level.weights.resize(static_cast<std::size_t>(most - level.least + 1));
+    }
     for (std::size_t i = 0; i < level.weights.size(); ++i) {
         const auto from_mode = static_cast<double>(level.least + static_cast<std::int64_t>(i) - level.mode);
         const double exponent = lambda_ * static_cast<double>(level.score) * from_mode;
         largest_exponent_ = std::max(largest_exponent_, std::fabs(exponent));
         level.weights[i] *= std::exp(exponent) / total;
     }
+    log_largest_ += std::max(0.0, std::log(*std::max_element(level.weights.begin(), level.weights.end())));
     return level;
 }
 
@@ -140,14 +140,14 @@ double FewLevelsLaw::seconds() const {
 
 std::int64_t FewLevelsLaw::first_rest() const {
     const auto before = levels_.end() - 2;
-    return chosen_ - std::accumulate(levels_.begin(), before, std::int64_t{0},
-                                     [](std::int64_t sum, const Level& level) { return sum + level.most(); });
+    return tail_.chosen() - std::accumulate(levels_.begin(), before, std::int64_t{0},
+                                            [](std::int64_t sum, const Level& level) { return sum + level.most(); });
 }
 
 std::int64_t FewLevelsLaw::last_rest() const {
     const auto before = levels_.end() - 2;
-    return chosen_ - std::accumulate(levels_.begin(), before, std::int64_t{0},
-                                     [](std::int64_t sum, const Level& level) { return sum + level.least; });
+    return tail_.chosen() - std::accumulate(levels_.begin(), before, std::int64_t{0},
+                                            [](std::int64_t sum, const Level& level) { return sum + level.least; });
 }
 
 // Goes through all numbers taken of levels first to last - 1, with the product of their weights and the sum of their
@@ -172,7 +172,7 @@ FewLevelsLaw::Sums FewLevelsLaw::sum_of_signs() const {
     std::partial_sum(cumulative.begin(), cumulative.end(), cumulative.begin());
     Sums sums;
     for_all(levels_, 0, levels_.size() - 1, 1, 0, 0, [&](double weight, std::int64_t, std::int64_t sum) {
-        const std::int64_t rest = w_ - sum;
+        const std::int64_t rest = tail_.w() - sum;
         if (rest < last.least * last.score) {
             return;
         }
@@ -207,14 +207,14 @@ FewLevelsLaw::Sums FewLevelsLaw::sum_of_choice() const {
         std::partial_sum(terms.begin(), terms.end(), cumulative.begin());
         // x of the lower level and rest - x of the higher one: rest * high - x * gap is at most what is left.
         const auto take = [&](double weight, std::int64_t sum) {
-            const std::int64_t wanted = divided_up(sum + rest * high.score - w_, gap);
+            const std::int64_t wanted = divided_up(sum + rest * high.score - tail_.w(), gap);
             if (wanted > most) {
                 return;
             }
             const std::int64_t x = std::max(wanted, least);
             const auto i = static_cast<std::size_t>(most - x);
             sums.through.add(weight * cumulative[i]);
-            sums.at.add(sum + rest * high.score - x * gap == w_ ? weight * terms[i] : 0);
+            sums.at.add(sum + rest * high.score - x * gap == tail_.w() ? weight * terms[i] : 0);
         };
         if (before == 0) {
             take(1, 0);
@@ -223,7 +223,7 @@ FewLevelsLaw::Sums FewLevelsLaw::sum_of_choice() const {
         // The last level before them takes what is left of the count.
         const Level& closing = levels_[before - 1];
         for_all(levels_, 0, before - 1, 1, 0, 0, [&](double weight, std::int64_t count, std::int64_t sum) {
-            const std::int64_t taken = chosen_ - rest - count;
+            const std::int64_t taken = tail_.chosen() - rest - count;
             if (taken >= closing.least && taken <= closing.most()) {
                 take(weight * closing.weights[static_cast<std::size_t>(taken - closing.least)],
                      sum + taken * closing.score);
@@ -236,14 +236,12 @@ FewLevelsLaw::Sums FewLevelsLaw::sum_of_choice() const {
 std::optional<CertifiedTail> FewLevelsLaw::evaluate() const {
     const Sums sums = free() ? sum_of_signs() : sum_of_choice();
     const double through = sums.through.value();
-    const double reach = std::fabs(a_) + lambda_ * law_.largest_offset();
-    const Jet jet = law_.jet(a_, -lambda_, law_.series_serves(reach));
-    const double log_count = free() ? 0 : log_count_probability(law_.size(), static_cast<double>(chosen_));
-    double at_modes = -static_cast<double>(w_);
+    const Jet jet = jet_at(law_, a_, lambda_);
+    double at_modes = -static_cast<double>(tail_.w());
     for (const Level& level : levels_) {
         at_modes += static_cast<double>(level.mode) * static_cast<double>(level.score);
     }
-    const double log_height = jet.value + lambda_ * distance_ + lambda_ * at_modes - log_count;
+    const double log_height = jet.value + lambda_ * tail_.distance() + lambda_ * at_modes - tail_.log_count();
     CertifiedTail tail;
     tail.lower = std::exp(log_height) * through;
     tail.mass = std::exp(log_height) * sums.at.value();
@@ -253,12 +251,14 @@ std::optional<CertifiedTail> FewLevelsLaw::evaluate() const {
     const double weight_error =
         levels * (6 * static_cast<double>(widest_) + 3 * largest_exponent_ + 20) + 4 * static_cast<double>(widest_);
     const double log_error = jet.error + 8 * unit_roundoff *
-                                             (std::fabs(jet.value) + std::fabs(lambda_ * distance_) +
-                                              std::fabs(lambda_ * at_modes) + 4 * std::fabs(log_count) + 8);
-    const double omitted = 2 * left_out_ * std::exp(-lambda_ * at_modes) / through;
+                                             (std::fabs(jet.value) + std::fabs(lambda_ * tail_.distance()) +
+                                              std::fabs(lambda_ * at_modes) + 4 * std::fabs(tail_.log_count()) + 8);
+    // A product below the range of a double has lost at most that much, times the largest of the other weights.
+    const double lost = most_sums * smallest_positive_p * std::exp(log_largest_);
+    const double omitted = (2 * left_out_ * std::exp(-lambda_ * at_modes) + lost) / through;
     tail.relative_error = weight_error * unit_roundoff + log_error + omitted;
     tail.mass_error = (weight_error * unit_roundoff + log_error) * tail.mass + omitted * tail.lower;
-    const bool useful = through > 0 && tail.relative_error <= useful_accuracy;
+    const bool useful = through > 0 && std::isfinite(tail.lower) && tail.relative_error <= useful_accuracy;
     return useful ? std::optional(tail) : std::nullopt;
 }
 

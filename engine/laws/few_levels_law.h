@@ -5,8 +5,7 @@
 #pragma once
 
 #include "compensated_sum.h"
-#include "inversion/certified_inversion.h"
-#include "inversion/characteristic.h"
+#include "inversion/sought_tail.h"
 
 #include <cstddef>
 #include <cstdint>
@@ -22,6 +21,8 @@ public:
     // Of 2 to most_levels scores, at w, not above the mean. The same arguments as CertifiedInversion's.
     static FewLevelsLaw of_signs(const ScoredItems& items, std::int64_t w);
     static FewLevelsLaw of_choice(const ScoredItems& items, std::int64_t chosen, std::int64_t w);
+    FewLevelsLaw(const FewLevelsLaw&) = delete;
+    FewLevelsLaw& operator=(const FewLevelsLaw&) = delete;
 
     // Predicted.
     [[nodiscard]] double seconds() const;
@@ -48,7 +49,7 @@ private:
     void find_tilt();
     void fill_levels();
     [[nodiscard]] Level level_of(std::size_t group);
-    [[nodiscard]] bool free() const { return count_ == Count::free; }
+    [[nodiscard]] bool free() const { return !tail_.count_is_fixed(); }
 
     // The least and the most that the last two levels can have together, given the count.
     [[nodiscard]] std::int64_t first_rest() const;
@@ -58,16 +59,14 @@ private:
     [[nodiscard]] Sums sum_of_choice() const;
 
     Characteristic law_;
-    Count count_;
-    std::int64_t chosen_;
-    std::int64_t w_;
-    double distance_ = 0; // of w from the mean
+    SoughtTail tail_; // of law_
     double a_ = 0;
     double lambda_ = 0;
     std::vector<Level> levels_; // the widest last
     double left_out_ = 0;
     std::int64_t widest_ = 0;
     double largest_exponent_ = 0;
+    double log_largest_ = 0; // of the product of each level's largest weight, or 1
 };
 
 } // namespace rankstead

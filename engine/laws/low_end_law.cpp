@@ -118,18 +118,14 @@ std::optional<Tails> low_end_tails(const ChoiceScores& scores) {
     const auto probability = [&](double count) {
         return std::ldexp(count * std::exp2(whole - log2_total), scale - static_cast<int>(whole));
     };
-    Tails tails;
-    tails.law = LawKind::summed;
-    tails.lower = probability(through.value());
-    tails.upper = 1 - probability(below.value());
     // Additions of positive terms, and the logarithm of the number of all choices, right to a few units of n log n.
     const auto size = static_cast<double>(n);
-    tails.relative_error =
+    const double error =
         unit_roundoff * (2 * (size + static_cast<double>(sides.excess) + 20) + 16 * size * (std::log(size) + 1));
-    if (!std::isfinite(through.value()) || through.value() <= 0 || tails.relative_error > 1e-10) {
+    if (!std::isfinite(through.value()) || through.value() <= 0 || error > useful_accuracy) {
         return std::nullopt;
     }
-    return tails;
+    return from_lower(LawKind::summed, probability(through.value()), 1 - probability(below.value()), error);
 }
 
 } // namespace rankstead

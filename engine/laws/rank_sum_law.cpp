@@ -72,13 +72,9 @@ Tails summed(const ChoiceScores& scores) {
     const auto n = static_cast<std::int64_t>(scores.scores.size());
     const double total = double_choose(n, scores.chosen);
     const auto mass = split_up_tail<double>(scores);
-    Tails tails;
-    tails.lower = (mass.below + mass.at) / total;
-    tails.upper = 1 - mass.below / total;
     // An addition for each score, and for each group a product and a rounded binomial coefficient.
-    tails.relative_error = (3 * static_cast<double>(n) + 12) * 0.5 * std::numeric_limits<double>::epsilon();
-    tails.law = LawKind::summed;
-    return tails;
+    return from_lower(LawKind::summed, (mass.below + mass.at) / total, 1 - mass.below / total,
+                      (3 * static_cast<double>(n) + 12) * 0.5 * std::numeric_limits<double>::epsilon());
 }
 
 } // namespace
@@ -188,12 +184,9 @@ std::optional<Tails> low_tails(const UntiedLaw& law, std::int64_t m, std::int64_
     const std::vector<UInt128> count = gaussian_binomial<UInt128>(m, n, u);
     const UInt128 through = std::accumulate(count.begin(), count.end(), UInt128{0});
     const double total = double_choose(m + n, m);
-    Tails tails;
-    tails.law = LawKind::summed;
-    tails.lower = static_cast<double>(through) / total;
-    tails.upper = 1 - static_cast<double>(through - count.back()) / total;
-    tails.relative_error = (static_cast<double>(m) + 12) * 0.5 * std::numeric_limits<double>::epsilon();
-    return tails;
+    return from_lower(LawKind::summed, static_cast<double>(through) / total,
+                      1 - static_cast<double>(through - count.back()) / total,
+                      (static_cast<double>(m) + 12) * 0.5 * std::numeric_limits<double>::epsilon());
 }
 
 } // namespace
@@ -250,16 +243,16 @@ Tails UntiedRankSumLaw::at(std::int64_t k) const {
     const std::int64_t pairs = first_ * second_;
     const bool above = k > pairs - k;
     const std::int64_t low = above ? pairs - k : k;
-    const auto few = cumulative_
-                         ? std::nullopt
-                         : low_tails(inversion_->law(), std::min(first_, second_), std::max(first_, second_), low);
-    Tails tails = cumulative_ ? cumulative_->at(static_cast<std::size_t>(low))
-                  : few       ? *few
-                              : untied_rank_sum_tails(first_, second_, low, *inversion_);
-    if (low == pairs - low) {
-        tails.upper = tails.lower;
-    }
+    const Tails tails = levelled(lower_half_at(low), low == pairs - low);
     return above ? tails.swapped() : tails;
+}
+
+Tails UntiedRankSumLaw::lower_half_at(std::int64_t low) const {
+    if (cumulative_) {
+        return cumulative_->at(static_cast<std::size_t>(low));
+    }
+    const auto few = low_tails(inversion_->law(), std::min(first_, second_), std::max(first_, second_), low);
+    return few ? *few : untied_rank_sum_tails(first_, second_, low, *inversion_);
 }
 
 Tails UntiedRankSumLaw::best_at(std::int64_t k) const {

@@ -58,6 +58,8 @@ public:
     [[nodiscard]] Tails best_at(std::int64_t k) const;
 
 private:
+    [[nodiscard]] Tails lower_half_at(std::int64_t low) const;
+
     class Cumulative;
     std::int64_t first_;
     std::int64_t second_;

@@ -73,13 +73,8 @@ Tails summed_tails(const SignScores& scores, std::int64_t k) {
     }
     CompensatedSum lower = below;
     lower.add(mass.back());
-    Tails tails;
-    tails.lower = std::ldexp(lower.value(), rest_exponent(n));
-    tails.upper = 1 - std::ldexp(below.value(), rest_exponent(n));
-    tails.relative_error =
-        tails.lower < smallest_positive_p ? std::numeric_limits<double>::infinity() : addition_error(n);
-    tails.law = LawKind::summed;
-    return tails;
+    return from_lower(LawKind::summed, std::ldexp(lower.value(), rest_exponent(n)),
+                      1 - std::ldexp(below.value(), rest_exponent(n)), addition_error(n));
 }
 
 } // namespace
@@ -155,10 +150,9 @@ UntiedSignedRankLaw::~UntiedSignedRankLaw() = default;
 Tails UntiedSignedRankLaw::at(std::int64_t k) const {
     const bool above = k > sum_ - k;
     const std::int64_t low = above ? sum_ - k : k;
-    Tails tails = inversion_ ? untied_signed_rank_tails(n_, low, *inversion_) : tabled(static_cast<std::size_t>(low));
-    if (low == sum_ - low) {
-        tails.upper = tails.lower;
-    }
+    const Tails tails =
+        levelled(inversion_ ? untied_signed_rank_tails(n_, low, *inversion_) : tabled(static_cast<std::size_t>(low)),
+                 low == sum_ - low);
     return above ? tails.swapped() : tails;
 }
 
@@ -167,12 +161,8 @@ Tails UntiedSignedRankLaw::tabled(std::size_t low) const {
         const std::uint64_t total = std::uint64_t{1} << n_;
         return from_counts({counted_[low], total - (low > 0 ? counted_[low - 1] : 0), total});
     }
-    Tails tails;
-    tails.law = LawKind::summed;
-    tails.lower = summed_[low];
-    tails.upper = 1 - (low > 0 ? summed_[low - 1] : 0);
-    tails.relative_error = addition_error(static_cast<std::size_t>(n_));
-    return tails;
+    return from_lower(LawKind::summed, summed_[low], 1 - (low > 0 ? summed_[low - 1] : 0),
+                      addition_error(static_cast<std::size_t>(n_)));
 }
 
 Tails UntiedSignedRankLaw::best_at(std::int64_t k) const {

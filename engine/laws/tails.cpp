@@ -29,6 +29,20 @@ Tails Tails::swapped() const {
     return other;
 }
 
+Tails from_lower(LawKind law, double lower, double upper, double relative_error) {
+    Tails tails;
+    tails.law = law;
+    tails.lower = lower;
+    tails.upper = std::min(1.0, upper);
+    tails.relative_error = lower < smallest_positive_p ? std::numeric_limits<double>::infinity() : relative_error;
+    return tails;
+}
+
+Tails levelled(Tails tails, bool at_centre) {
+    tails.upper = at_centre ? tails.lower : tails.upper;
+    return tails;
+}
+
 Tails from_counts(const Counts& counts) {
     const auto total = static_cast<double>(counts.total);
     Tails tails{static_cast<double>(counts.lower) / total, static_cast<double>(counts.upper) / total, counts, 0};

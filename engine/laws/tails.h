@@ -43,6 +43,13 @@ struct Tails {
 
 [[nodiscard]] Tails from_counts(const Counts& counts);
 
+// Of a law in floating point, from the lower tail and the bound on its relative error, which no longer holds for what a
+// double cannot hold.
+[[nodiscard]] Tails from_lower(LawKind law, double lower, double upper, double relative_error);
+
+// At the centre of a symmetric law both tails are equal.
+[[nodiscard]] Tails levelled(Tails tails, bool at_centre);
+
 // Two-sided: twice the smaller tail, at most 1.
 [[nodiscard]] double p_value(const Tails& tails, Side side);
 

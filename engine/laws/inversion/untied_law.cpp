@@ -119,7 +119,8 @@ UntiedLaw::Tilted::Tilted(const UntiedLaw& law, double lambda, std::int64_t w, s
     const double most = first >= 0.5 && last <= 0.5 ? 0.25 : std::max(weight(first), weight(last));
     total_weight_ = (1 - slack) * ((first - last) / lambda - most);
     largest_weight_ = (1 + slack) * most;
-    log_condition_ = std::log((4 * std::sqrt(std::max(0.0, total_weight_) + 1) + 1) / 0.75);
+    const double most_variance = (1 + slack) * ((first - last) / lambda + most);
+    log_condition_ = std::log((4 * std::sqrt(most_variance) + 1) / 0.75);
 }
 
 double UntiedLaw::Tilted::decay_from(double t) const {

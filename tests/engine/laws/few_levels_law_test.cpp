@@ -74,6 +74,23 @@ TEST(FewLevelsLaw, agrees_with_the_inversion_in_large_samples_far_into_the_tail)
     }
 }
 
+// Weights and sums there span more than a double does: right within the bound, or none.
+TEST(FewLevelsLaw, near_the_end_of_a_large_law_is_right_or_gives_none) {
+    const ScoredItems items{{0, 40'001, 90'007}, {40'000, 50'000, 45'000}};
+    const CertifiedInversion inversion = CertifiedInversion::of_choice(items, 60'000);
+    const std::int64_t mean = 60'000 * items.sum() / items.size();
+    for (const std::int64_t part : {40, 20, 14, 8, 4, 3, 2}) {
+        const std::int64_t w = mean - mean / part;
+        const auto levels = FewLevelsLaw::of_choice(items, 60'000, w).evaluate();
+        const auto inverted = inversion.at(w, 1);
+        ASSERT_TRUE(!levels || std::isfinite(levels->lower)) << part;
+        if (levels && inverted && inverted->lower > 1e-300) {
+            EXPECT_NEAR(levels->lower / inverted->lower, 1, levels->relative_error + inverted->relative_error) << part;
+        }
+    }
+    EXPECT_TRUE(FewLevelsLaw::of_choice(items, 60'000, mean - mean / 40).evaluate());
+}
+
 TEST(FewLevelsLaw, predicts_little_for_three_levels_of_a_million_and_much_for_six) {
     const ScoredItems three{{0, 5, 11}, {700'000, 700'000, 600'000}};
     EXPECT_LT(FewLevelsLaw::of_choice(three, 1'000'000, 5'000'000).seconds(), 0.2);

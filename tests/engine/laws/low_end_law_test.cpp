@@ -50,6 +50,14 @@ TEST(LowEndLaw, counts_partitions_without_ties) {
     EXPECT_LE(test::relative_error(tails->lower, count, test::big_choose(800, 400)), tails->relative_error);
 }
 
+// C(2000, 1000) is beyond 2^1900: a bound stated for a tail that a double cannot hold would be broken.
+TEST(LowEndLaw, states_no_bound_for_a_tail_below_the_range_of_a_double) {
+    const auto tails = low_end_tails(untied_choice_scores(1000, 1000, 3));
+    ASSERT_TRUE(tails);
+    EXPECT_LT(tails->lower, smallest_positive_p);
+    EXPECT_TRUE(std::isinf(tails->relative_error));
+}
+
 TEST(LowEndLaw, predicts_more_than_any_time_allowed_in_the_middle_of_a_large_law) {
     EXPECT_EQ(low_end_seconds(untied_choice_scores(500, 500, 125'000)), std::numeric_limits<double>::infinity());
     EXPECT_LT(low_end_seconds(untied_choice_scores(500, 500, 300)), 0.01);

@@ -3,6 +3,8 @@
 
 #include <gtest/gtest.h>
 
+#include <cmath>
+
 namespace rankstead {
 namespace {
 
@@ -70,6 +72,18 @@ TEST(AtMost, compares_probabilities_where_nothing_was_counted) {
     EXPECT_TRUE(upper_at_most(of(1, 0.025), {25, 1000}));
     EXPECT_FALSE(upper_at_most(of(1, 0.0251), {25, 1000}));
     EXPECT_TRUE(lower_at_most(of(0.01, 1), {25, 1000}));
+}
+
+TEST(FromLower, states_a_bound_only_for_what_a_double_can_hold) {
+    EXPECT_EQ(from_lower(LawKind::summed, 0.1, 0.95, 1e-12).relative_error, 1e-12);
+    EXPECT_TRUE(std::isinf(from_lower(LawKind::summed, 1e-310, 1, 1e-12).relative_error));
+    EXPECT_EQ(from_lower(LawKind::closed, 0.1, 1 + 1e-15, 0).upper, 1);
+}
+
+TEST(Levelled, has_equal_tails_at_the_centre_only) {
+    const Tails tails = from_lower(LawKind::summed, 0.5078125, 0.5078126, 1e-12);
+    EXPECT_EQ(levelled(tails, true).upper, tails.lower);
+    EXPECT_EQ(levelled(tails, false).upper, tails.upper);
 }
 
 } // namespace
